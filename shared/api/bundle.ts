@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { CONTROL_CHARACTER } from '../layout/schema';
 
 /** What the maker chooses about a bundle. */
 export const bundleRequestSchema = z.strictObject({
@@ -12,7 +13,8 @@ export const bundleRequestSchema = z.strictObject({
         .string({ error: 'must be text' })
         .trim()
         .min(3, 'must say why, in at least 3 characters')
-        .max(500, 'must be at most 500 characters'),
+        .max(500, 'must be at most 500 characters')
+        .refine((text) => !CONTROL_CHARACTER.test(text), 'must not contain control characters'),
     })
     .optional(),
 });

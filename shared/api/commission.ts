@@ -1,7 +1,14 @@
 import * as z from 'zod';
 import { lineOfText } from '../layout/schema';
 
-export const STAGES = ['design', 'with-client', 'approved', 'cutting', 'assembly', 'delivered'] as const;
+export const STAGES = [
+  'design',
+  'with-client',
+  'approved',
+  'cutting',
+  'assembly',
+  'delivered',
+] as const;
 export const stageSchema = z.enum(STAGES, { error: `must be one of ${STAGES.join(', ')}` });
 export type Stage = z.infer<typeof stageSchema>;
 
@@ -58,3 +65,8 @@ export type Commission = z.infer<typeof commissionSchema>;
 
 export const commissionListSchema = z.object({ commissions: z.array(commissionSchema) });
 export type CommissionList = z.infer<typeof commissionListSchema>;
+
+/** The choice of the list: those at work, those in the archive, or (left out) both. */
+export const commissionFilterSchema = z.strictObject({
+  archived: z.enum(['true', 'false'], { error: 'must be "true" or "false"' }).optional(),
+});

@@ -11,8 +11,24 @@ import {
 } from '../layout/schema';
 
 const TILES_MOST = BOUNDS.staves.most * BOUNDS.courses.most;
-const positionsSchema = z.array(z.int().min(0).max(TILES_MOST - 1)).min(1).max(TILES_MOST);
-const woodIndexesSchema = z.array(z.int().min(0).max(BOUNDS.woods.most - 1)).min(1).max(TILES_MOST);
+const positionsSchema = z
+  .array(
+    z
+      .int()
+      .min(0)
+      .max(TILES_MOST - 1),
+  )
+  .min(1)
+  .max(TILES_MOST);
+const woodIndexesSchema = z
+  .array(
+    z
+      .int()
+      .min(0)
+      .max(BOUNDS.woods.most - 1),
+  )
+  .min(1)
+  .max(TILES_MOST);
 
 function field<const P extends string, T extends z.ZodType>(path: P, value: T) {
   return z.strictObject({

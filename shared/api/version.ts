@@ -6,7 +6,10 @@ import { thumbnailSchema } from './commission';
 export const noteSchema = z
   .string({ error: 'must be text' })
   .max(2000, 'must be at most 2000 characters')
-  .refine((text) => !/[\u0000-\u0009\u000b-\u001f\u007f]/.test(text), 'must not contain control characters');
+  .refine(
+    (text) => !/[\u0000-\u0009\u000b-\u001f\u007f]/.test(text),
+    'must not contain control characters',
+  );
 
 export const keepVersionSchema = z.strictObject({
   /** The revision of the draft as the person saw it; another one answers 409. */

@@ -46,7 +46,9 @@ function wholeNumberWithin(bound: Bound) {
 /** A length in millimetres within the bound. */
 const length = (bound: Bound) => numberWithin(bound, ' mm');
 
-const CONTROL_CHARACTER = /[\u0000-\u001f\u007f-\u009f\u2028\u2029\ud800-\udfff\ufffe\uffff]/u;
+/** What no text of ours may hold: control characters, line separators, lone surrogates. */
+export const CONTROL_CHARACTER =
+  /[\u0000-\u001f\u007f-\u009f\u2028\u2029\ud800-\udfff\ufffe\uffff]/u;
 
 /** One line of text as people name things: no control characters, not only spaces, at most `most` characters. */
 export function lineOfText(most: number) {
