@@ -8,7 +8,7 @@ import { fromMillimetres, type LengthUnit } from '@shared/units/length';
 import { printDecimal } from '../decimal';
 import { LAYER_COLOURS, type DxfDrawing, type DxfLabel, type DxfOutline } from './drawing';
 import { dxfText } from './dxf-text';
-import { DXF_DECIMALS, verticesOf } from './vertices';
+import { BULGE_DECIMALS, DXF_DECIMALS, verticesOf } from './vertices';
 
 const UNIT_NAMES: Record<LengthUnit, string> = { mm: 'millimetres', in: 'inches' };
 
@@ -86,7 +86,7 @@ function polyline({ layer, outline }: DxfOutline, unit: LengthUnit): Group[] {
     [0, 'VERTEX'],
     [8, layer],
     ...pointGroups(x, y, 0),
-    ...(bulge === 0 ? [] : [[42, decimal(bulge)] as const]),
+    ...(bulge === 0 ? [] : [[42, printDecimal(bulge, BULGE_DECIMALS)] as const]),
   ]);
   return [
     [0, 'POLYLINE'],

@@ -11,10 +11,11 @@ export interface DxfVertex {
 }
 
 /**
- * Decimals of what is written. A radius is found from chord and bulge, so its error is that of the
- * coordinates times radius / chord: ten decimals keep a 150 mm radius on a 0.01 mm chord within 1e-5 mm.
+ * Decimals of what is written. A reader finds a radius from chord and bulge, so errors of either grow with
+ * radius / chord: these keep a 150 mm radius on a 0.01 mm chord within 1e-5 mm.
  */
 export const DXF_DECIMALS = 10;
+export const BULGE_DECIMALS = 14;
 
 /** A bulge grows without end towards a full circle; such arcs are written as two. */
 const LONGEST_SWEEP = (350 * Math.PI) / 180;
@@ -43,11 +44,11 @@ function vertexAt(point: PointMm, bulge: number, unit: LengthUnit): DxfVertex {
   return {
     x: roundForDxf(fromMillimetres(point.x, unit)),
     y: roundForDxf(fromMillimetres(point.y, unit)),
-    bulge: roundForDxf(bulge),
+    bulge: roundForDxf(bulge, BULGE_DECIMALS),
   };
 }
 
 /** Rounded as it is written; what is next to nothing becomes 0, so no number needs an exponent. */
-export function roundForDxf(value: number): number {
-  return Math.abs(value) < POINT_TOLERANCE ? 0 : Number(value.toFixed(DXF_DECIMALS));
+export function roundForDxf(value: number, decimals = DXF_DECIMALS): number {
+  return Math.abs(value) < POINT_TOLERANCE ? 0 : Number(value.toFixed(decimals));
 }
