@@ -3,7 +3,7 @@
  * after, so it can be applied, inverted and squashed without the document it came from. The browser's undo,
  * its save queue and the server all use these functions.
  */
-import type { Build, Cutter, Joint, Layout, Shell, Wood } from './schema';
+import type { Build, Cutter, Joint, Layout, Wood } from './schema';
 
 /** Tiles laid: positions in the cells with the wood before and after. */
 export interface CellsChange {

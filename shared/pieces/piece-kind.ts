@@ -25,4 +25,3 @@ export interface PieceKind {
   /** Those of the positions whose tile is the drawing after half a turn. */
   readonly halfTurned: readonly number[];
 }
-
