@@ -111,7 +111,7 @@ module.exports = {
       severity: 'error',
       from: {
         path: '^(shared|exports|server|src)/',
-        pathNot: ['^server/.*-store\\.ts$', '^server/(main|database)\\.ts$', '\\.spec\\.ts$'],
+        pathNot: ['^server/.*-store\\.ts$', '\\.spec\\.ts$'],
       },
       to: { path: packages(['drizzle-orm', 'pg']) },
     },

@@ -4,6 +4,7 @@
  */
 declare function btoa(data: string): string;
 declare function atob(data: string): string;
+declare function structuredClone<Value>(value: Value): Value;
 
 declare class TextEncoder {
   encode(text?: string): Uint8Array<ArrayBuffer>;
