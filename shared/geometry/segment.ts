@@ -5,6 +5,7 @@
  */
 import type { Radians } from '../units/angle';
 import type { Millimetres, PointMm } from '../units/length';
+import { subtract, unit } from './vector';
 
 /** A straight piece of an outline. */
 export interface LineSegment {
@@ -63,4 +64,23 @@ export function lengthOf(segment: Segment): Millimetres {
  */
 export function bulgeOf(segment: Segment): number {
   return segment.kind === 'line' ? 0 : Math.tan(segment.sweep / 4);
+}
+
+/** Direction of travel where the segment starts, length 1. */
+export function directionAtStart(segment: Segment): PointMm {
+  return segment.kind === 'line'
+    ? unit(subtract(segment.to, segment.from))
+    : directionOnArc(segment.startAngle, segment.sweep);
+}
+
+/** Direction of travel where the segment ends, length 1. */
+export function directionAtEnd(segment: Segment): PointMm {
+  return segment.kind === 'line'
+    ? unit(subtract(segment.to, segment.from))
+    : directionOnArc(segment.startAngle + segment.sweep, segment.sweep);
+}
+
+function directionOnArc(angle: Radians, sweep: Radians): PointMm {
+  const hand = sweep < 0 ? -1 : 1;
+  return { x: -hand * Math.sin(angle), y: hand * Math.cos(angle) };
 }

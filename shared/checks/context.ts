@@ -1,0 +1,69 @@
+import { edgeProfile, type EdgeProfile } from '../joint/edge-profile';
+import type { JointParameters } from '../joint/parameters';
+import type { Layout } from '../layout/schema';
+import {
+  layoutFit,
+  layoutOutlines,
+  layoutWebs,
+  type LayoutFit,
+  type LayoutOutline,
+  type Webs,
+} from '../pieces/layout-fit';
+import { ringOf, type Ring } from '../shell/ring';
+import { formatLength } from '../units/format';
+import { fromMillimetres, type LengthUnit, type Millimetres } from '../units/length';
+import { FINISHING_MARGIN, WEB_MINIMUM_MM, type CheckResult, type CheckSettings } from './check';
+
+/** One joint of the layout with its name in sentences. */
+export interface NamedJoint {
+  readonly name: 'stave joint' | 'course joint';
+  readonly parameters: JointParameters;
+  readonly profile: EdgeProfile;
+}
+
+/** What the checks share, computed once. */
+export interface CheckContext {
+  readonly layout: Layout;
+  readonly finishingMargin: number;
+  readonly webMinimum: Millimetres;
+  readonly joints: readonly NamedJoint[];
+  readonly outlines: readonly LayoutOutline[];
+  readonly fit: LayoutFit;
+  readonly webs: Webs;
+  readonly ring: Ring;
+  /** A length in the reader's unit: "1.40 mm". */
+  readonly length: (length: Millimetres) => string;
+  /** A cutter's diameter with a third decimal where it has one: "3.175 mm". */
+  readonly cutter: (diameter: Millimetres) => string;
+}
+
+/** A check: from what is shared to what was found. */
+export type Check = (context: CheckContext) => CheckResult;
+
+/** Computes what the checks share. The layout must hold together (see `problemsOf`). */
+export function checkContext(layout: Layout, settings: CheckSettings): CheckContext {
+  const unit = settings.lengthUnit ?? layout.lengthUnit;
+  const { staveJoint, courseJoint } = layout.joint;
+  const outlines = layoutOutlines(layout);
+  return {
+    layout,
+    finishingMargin: settings.finishingMargin ?? FINISHING_MARGIN,
+    webMinimum: settings.webMinimum ?? WEB_MINIMUM_MM,
+    joints: [
+      { name: 'stave joint', parameters: staveJoint, profile: edgeProfile(staveJoint) },
+      { name: 'course joint', parameters: courseJoint, profile: edgeProfile(courseJoint) },
+    ],
+    outlines,
+    fit: layoutFit(layout, outlines),
+    webs: layoutWebs(outlines),
+    ring: ringOf(layout.shell, staveJoint.reach),
+    length: (length) => formatLength(length, unit),
+    cutter: (diameter) => formatCutter(diameter, unit),
+  };
+}
+
+/** A cutter's size: millimetres with up to three decimals, since 1/8 in is 3.175 mm; inches with three. */
+export function formatCutter(diameter: Millimetres, unit: LengthUnit): string {
+  const figure = fromMillimetres(diameter, unit).toFixed(3);
+  return `${unit === 'mm' ? figure.replace(/0$/, '') : figure} ${unit}`;
+}

@@ -1,0 +1,71 @@
+import { socketDepth } from '../pieces/layout-fit';
+import { trimOf } from '../shell/trim';
+import type { Millimetres } from '../units/length';
+import type { CheckResult } from './check';
+import type { Check, CheckContext } from './context';
+
+/** Whether the courses make the finished height, and what the trim lines cut. */
+export const trim: Check = (context) => {
+  const { layout, length } = context;
+  const { courses, finishedHeight, tileHeight } = layout.shell;
+  const { untrimmedHeight, eachEnd } = trimOf(layout.shell);
+  const base = {
+    key: 'trim',
+    station: 'shell',
+    title: 'Trim',
+    figure: { value: eachEnd, kind: 'length' },
+    limit: { value: greatestTrim(context), kind: 'length' },
+    reason: 'What is trimmed off the ends must not open a joint or leave a sliver that breaks out.',
+  } as const satisfies Partial<CheckResult>;
+  const made = `${courses} ${courses === 1 ? 'course makes' : 'courses make'} ${length(untrimmedHeight)}`;
+  if (eachEnd < -1e-9) {
+    return {
+      ...base,
+      result: 'stop',
+      finding: `${made}, less than the finished height of ${length(finishedHeight)}.`,
+      remedy: `Add a course or taller tiles, or finish at ${length(untrimmedHeight)} or less.`,
+    };
+  }
+  const trimmed = `${made}; ${length(Math.max(0, eachEnd))} is trimmed at each end`;
+  if (eachEnd > greatestTrim(context)) {
+    return {
+      ...base,
+      result: 'stop',
+      finding: `${trimmed}, past the course joint of the end tiles.`,
+      remedy: `Take a course less, or finish at ${length(untrimmedHeight - 2 * greatestTrim(context))} or more.`,
+    };
+  }
+  const spoiled = eachEnd > 1e-9 ? spoiledBy(eachEnd, tileHeight, context) : null;
+  if (spoiled) {
+    return {
+      ...base,
+      result: 'caution',
+      finding: `${trimmed}, which ${spoiled}.`,
+      remedy: 'Change the finished height or the height of the tiles.',
+    };
+  }
+  return { ...base, result: 'clear', finding: `${trimmed}.`, remedy: '' };
+};
+
+/** The most that can be trimmed before the line meets the end tile's course joint. */
+function greatestTrim({ layout }: CheckContext): Millimetres {
+  const { courses, tileHeight } = layout.shell;
+  if (courses === 1) return tileHeight / 2;
+  return tileHeight - socketDepth(layout.joint.courseJoint.reach, layout.joint.clearance);
+}
+
+/** What a trim line spoils of the end tile's stave joint or of the web above it, or null. */
+function spoiledBy(
+  eachEnd: Millimetres,
+  tileHeight: Millimetres,
+  context: CheckContext,
+): string | null {
+  const { layout, joints, webMinimum, length } = context;
+  const head = (joints[0]?.profile.headWidth ?? 0) / 2 + layout.joint.clearance / 2;
+  const [from, to] = [tileHeight / 2 - head, tileHeight / 2 + head];
+  if (eachEnd > from && eachEnd < to) return 'cuts the stave joint of the end tiles';
+  const left = eachEnd <= from ? from - eachEnd : greatestTrim(context) - eachEnd;
+  if (left >= webMinimum || (eachEnd >= to && layout.shell.courses === 1)) return null;
+  const where = eachEnd <= from ? 'beside the stave joint' : 'under the course joint';
+  return `leaves only ${length(left)} of wood ${where}`;
+}

@@ -1,0 +1,11 @@
+import type { Build } from '../layout/schema';
+
+/** Spares of a kind: the workshop's share of its count rounded up, at least the workshop's minimum. */
+export function spareCount(
+  count: number,
+  build: Pick<Build, 'spareShare' | 'spareMinimum'>,
+): number {
+  // 0.1 × 30 is 3.0000000000000004: a share that divides must not round up to one more
+  const share = Math.ceil(Math.round(count * build.spareShare * 1e9) / 1e9);
+  return Math.max(share, build.spareMinimum);
+}
