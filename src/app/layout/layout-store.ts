@@ -1,0 +1,348 @@
+/**
+ * The open layout. Screens read it as signals and change it with gestures; it undoes, saves and merges by
+ * itself. Provided on the layout's route: it lives as long as the layout is open.
+ */
+import { computed, inject, Injectable, signal, type OnDestroy, type Signal } from '@angular/core';
+import { conflictSchema, type Edit, type EditSaved, type OpenLayout } from '@shared/api/layout';
+import type { VersionKept } from '@shared/api/version';
+import { wirePatchOf } from '@shared/api/wire-patch';
+import { decodeCells, type Grid } from '@shared/layout/cells';
+import { invertPatch, patchBetween, resizes, type Change, type Patch } from '@shared/layout/patch';
+import { restatePatch, type Contest } from '@shared/layout/rebase';
+import type { Layout, Wood } from '@shared/layout/schema';
+import type { LengthUnit } from '@shared/units/length';
+import { Subject, type Observable } from 'rxjs';
+import { apiFailureOf, type ApiFailure } from '../platform/api-problem';
+import { SessionStore } from '../platform/session-store';
+import {
+  isSaved,
+  madeChanges,
+  openDraft,
+  withAnswer,
+  withEdit,
+  withGestureFinished,
+  withGestureTakenBack,
+  withMove,
+  withSave,
+  withSaveTakenBack,
+  withTheirs,
+  type Draft,
+  type Met,
+  type Save,
+} from './draft';
+import { EditHistory } from './edit-history';
+import { LayoutApi } from './layout-api';
+import { SaveQueue, type Attempt, type SaveState } from './save-queue';
+
+export interface OpenedLayout {
+  readonly id: string;
+  readonly commission: OpenLayout['commission'];
+  readonly lastVersion: OpenLayout['lastVersion'];
+}
+
+export type Opening =
+  | { readonly kind: 'opening' }
+  | { readonly kind: 'open' }
+  | { readonly kind: 'failed'; readonly failure: ApiFailure };
+
+export type Origin = 'mine' | 'theirs' | 'undo' | 'redo' | 'opened';
+
+/** A change of the document on the screen, as it was just applied. */
+export interface Applied {
+  readonly patch: Patch;
+  readonly origin: Origin;
+}
+
+/** One thing a person does, from press to release: its moves are one step to undo and one edit to save. */
+export interface Gesture {
+  apply(...changes: (Change | null)[]): void;
+  finish(): void;
+  /** Takes back everything the gesture did. */
+  cancel(): void;
+}
+
+@Injectable()
+export class LayoutStore implements OnDestroy {
+  private readonly api = inject(LayoutApi);
+  private readonly session = inject(SessionStore);
+  private readonly draft = signal<Draft | null>(null);
+  private readonly opening = signal<Opening>({ kind: 'opening' });
+  private readonly openedLayout = signal<OpenedLayout | null>(null);
+  private readonly overlaid = signal<ReadonlySet<number>>(new Set());
+  private readonly openContests = signal<readonly Contest[]>([]);
+  private readonly refusedEdit = signal<ApiFailure | null>(null);
+  private readonly underHand = signal(false);
+  private readonly appliedSubject = new Subject<Applied>();
+  private readonly history = new EditHistory();
+  private readonly queue = new SaveQueue({
+    unsaved: () => this.unsaved(),
+    attempt: () => this.attemptSave(),
+  });
+  private commissionId = '';
+
+  readonly opened = this.openedLayout.asReadonly();
+  readonly openState = this.opening.asReadonly();
+  /** The document with unconfirmed edits. Throws before the layout is open: look at `opened` first. */
+  readonly layout: Signal<Layout> = computed(() => this.openDraft().local);
+  readonly cells = computed(() => this.layout().cells);
+  readonly woods: Signal<readonly Wood[]> = computed(() => this.layout().woods);
+  readonly grid: Signal<Grid> = computed(
+    () => ({ staves: this.layout().shell.staves, courses: this.layout().shell.courses }),
+    { equal: (a, b) => a.staves === b.staves && a.courses === b.courses },
+  );
+  readonly lengthUnit: Signal<LengthUnit> = computed(() => this.layout().lengthUnit);
+  /** The revision the server has. */
+  readonly revision = computed(() => this.openDraft().revision);
+  readonly saving: Signal<SaveState> = this.queue.state;
+  readonly rights = {
+    editPattern: computed(() => this.session.may('edit-pattern')),
+    editJoint: computed(() => this.session.may('edit-joint')),
+    keepVersions: computed(() => this.session.may('keep-versions')),
+    exportBundle: computed(() => this.session.may('export-bundle')),
+  };
+  readonly undoLabel = this.history.undoLabel;
+  readonly redoLabel = this.history.redoLabel;
+  readonly canUndo = computed(() => !this.underHand() && this.undoLabel() !== null);
+  readonly canRedo = computed(() => !this.underHand() && this.redoLabel() !== null);
+  /** Tiles where somebody else's edit met mine; mine is on top. */
+  readonly overlaidByMine = this.overlaid.asReadonly();
+  /** Fields both set, waiting for the person's choice. */
+  readonly contests = this.openContests.asReadonly();
+  /** Why the server will never take my last edit, which was taken back; null when there is no such thing. */
+  readonly refused = this.refusedEdit.asReadonly();
+  readonly applied$: Observable<Applied> = this.appliedSubject.asObservable();
+
+  ngOnDestroy(): void {
+    this.queue.stop();
+    this.appliedSubject.complete();
+  }
+
+  /** Opens the layout of a commission; `openState` says how it went. */
+  async open(commissionId: string): Promise<void> {
+    this.commissionId = commissionId;
+    this.opening.set({ kind: 'opening' });
+    try {
+      this.show(await this.api.open(commissionId));
+    } catch (thrown) {
+      this.opening.set({ kind: 'failed', failure: apiFailureOf(thrown) });
+    }
+  }
+
+  /** Opens again after a failure, or tries a failed save again at once. */
+  retry(): void {
+    if (this.opening().kind === 'failed') void this.open(this.commissionId);
+    else this.queue.retry();
+  }
+
+  /** Saves everything now; resolves when it is saved or failed, `saving` says which. */
+  flush(): Promise<void> {
+    return this.queue.flush();
+  }
+
+  /** True while something would be lost if the page went away now. */
+  unsaved(): boolean {
+    const draft = this.draft();
+    return draft !== null && !isSaved(draft);
+  }
+
+  begin(label: string): Gesture {
+    if (this.underHand())
+      throw new Error(`A gesture is still under the hand; "${label}" must wait`);
+    this.underHand.set(true);
+    return {
+      apply: (...changes) => this.move(madeChanges(changes)),
+      finish: () => this.finish(label),
+      cancel: () => this.takeBack(),
+    };
+  }
+
+  /** A gesture of one; does nothing when every change is null. */
+  edit(label: string, ...changes: (Change | null)[]): void {
+    const patch = madeChanges(changes);
+    if (patch.length === 0) return;
+    const gesture = this.begin(label);
+    gesture.apply(...patch);
+    gesture.finish();
+  }
+
+  undo(): void {
+    if (!this.canUndo()) return;
+    this.step(() => this.history.takeUndo(), invertPatch, 'undo');
+  }
+
+  redo(): void {
+    if (!this.canRedo()) return;
+    this.step(
+      () => this.history.takeRedo(),
+      (patch) => patch,
+      'redo',
+    );
+  }
+
+  /** The person has chosen about a contested field; "mine" is then set with an edit like any other. */
+  settleContest(contest: Contest): void {
+    this.openContests.update((contests) => contests.filter((open) => open !== contest));
+  }
+
+  /** The person has read why an edit was taken back. */
+  dismissRefusal(): void {
+    this.refusedEdit.set(null);
+  }
+
+  /** A version was kept of the draft as the server has it. */
+  versionKept(kept: VersionKept): void {
+    const { number, revision } = kept.version;
+    this.openedLayout.update(
+      (opened) => opened && { ...opened, lastVersion: { number, revision } },
+    );
+  }
+
+  /** Sends what is unsaved in a way that outlives the page. Edits made while a save is under way stay behind. */
+  saveLeaving(): void {
+    if (this.unsaved()) void this.attemptSave('leaving');
+  }
+
+  private openDraft(): Draft {
+    const draft = this.draft();
+    if (!draft) throw new Error('The layout is not open yet');
+    return draft;
+  }
+
+  private show(open: OpenLayout): void {
+    const { layout: file, revision, id, commission, lastVersion } = open;
+    const cells = decodeCells(file.cells) ?? new Uint8Array();
+    const { format: _format, formatVersion: _formatVersion, ...document } = file;
+    this.draft.set(openDraft({ ...document, cells }, revision));
+    this.openedLayout.set({ id, commission, lastVersion });
+    this.history.forget();
+    this.overlaid.set(new Set());
+    this.opening.set({ kind: 'open' });
+    this.appliedSubject.next({ patch: [], origin: 'opened' });
+  }
+
+  private move(patch: Patch): void {
+    if (patch.length === 0) return;
+    this.draft.set(withMove(this.openDraft(), patch));
+    this.appliedSubject.next({ patch, origin: 'mine' });
+  }
+
+  private finish(label: string): void {
+    const { draft, patch } = withGestureFinished(this.openDraft());
+    this.underHand.set(false);
+    this.draft.set(draft);
+    if (patch.length === 0) return;
+    this.history.note({ label, patch });
+    this.touched(patch);
+  }
+
+  private takeBack(): void {
+    const { draft, patch } = withGestureTakenBack(this.openDraft());
+    this.underHand.set(false);
+    this.draft.set(draft);
+    if (patch.length > 0) this.appliedSubject.next({ patch, origin: 'mine' });
+  }
+
+  /** Undoes or redoes one step; steps that others' edits left without effect are passed over. */
+  private step(
+    take: () => { patch: Patch } | null,
+    turn: (patch: Patch) => Patch,
+    origin: 'undo' | 'redo',
+  ): void {
+    for (let step = take(); step; step = take()) {
+      const patch = restatePatch(this.layout(), turn(step.patch));
+      if (patch.length === 0) continue;
+      this.draft.set(withEdit(this.openDraft(), patch));
+      this.appliedSubject.next({ patch, origin });
+      this.touched(patch);
+      return;
+    }
+  }
+
+  private touched(patch: Patch): void {
+    this.forgetOverlaid(patch);
+    this.queue.touch();
+  }
+
+  /** A tile laid again is mine beyond doubt; on another grid the positions mean nothing. */
+  private forgetOverlaid(patch: Patch): void {
+    if (this.overlaid().size === 0) return;
+    const laid = new Set(
+      patch.flatMap((change) => (change.kind === 'cells' ? change.positions : [])),
+    );
+    this.overlaid.update((overlaid) =>
+      resizes(patch) ? new Set() : new Set([...overlaid].filter((position) => !laid.has(position))),
+    );
+  }
+
+  private async attemptSave(way: 'staying' | 'leaving' = 'staying'): Promise<Attempt> {
+    const opened = this.openedLayout();
+    if (!opened) return { kind: 'done' };
+    this.draft.set(withSave(this.openDraft(), crypto.randomUUID()));
+    const save = this.openDraft().inFlight;
+    if (!save) return { kind: 'done' };
+    const send = way === 'leaving' ? this.api.saveLeaving : this.api.save;
+    try {
+      this.accept(save, await send.call(this.api, opened.id, wireEdit(save)));
+      return { kind: 'done' };
+    } catch (thrown) {
+      return this.digest(save, apiFailureOf(thrown));
+    }
+  }
+
+  private accept(save: Save, saved: EditSaved): void {
+    if (this.openDraft().inFlight?.key !== save.key) return;
+    this.meet(withAnswer(this.openDraft(), saved));
+  }
+
+  private digest(save: Save, failure: ApiFailure): Attempt {
+    if (this.openDraft().inFlight?.key !== save.key) return { kind: 'done' };
+    const conflict = conflictOf(failure);
+    if (conflict) {
+      this.meet(withTheirs(this.openDraft(), conflict));
+      return { kind: 'again' };
+    }
+    if (!FINAL_CODES.has(failure.code)) return { kind: 'failed', sentence: failure.message };
+    const before = this.layout();
+    const draft = withSaveTakenBack(this.openDraft());
+    this.draft.set(draft);
+    this.refusedEdit.set(failure);
+    this.appliedSubject.next({ patch: patchBetween(before, draft.local), origin: 'theirs' });
+    return { kind: 'again' };
+  }
+
+  private meet(met: Met): void {
+    const before = this.layout();
+    this.draft.set(met.draft);
+    if (met.theirs.length === 0) return;
+    if (resizes(met.theirs)) {
+      this.history.forget();
+      this.overlaid.set(new Set(met.overlaid));
+    } else if (met.overlaid.length > 0) {
+      this.overlaid.update((overlaid) => new Set([...overlaid, ...met.overlaid]));
+    }
+    this.openContests.update((contests) => [...contests, ...met.contests]);
+    const patch = patchBetween(before, met.draft.local);
+    if (patch.length > 0) this.appliedSubject.next({ patch, origin: 'theirs' });
+  }
+}
+
+/** Answers that will not change by asking again: the edit has to go. */
+const FINAL_CODES: ReadonlySet<string> = new Set([
+  'bad-input',
+  'not-allowed',
+  'not-found',
+  'too-large',
+]);
+
+function wireEdit(save: Save): Edit {
+  const { baseRevision, key, patch } = save;
+  return { baseRevision, idempotencyKey: key, patch: wirePatchOf(patch) };
+}
+
+/** The conflict a 409 carries, or null when the failure is something else. */
+function conflictOf(failure: ApiFailure): EditSaved | null {
+  if (failure.code !== 'conflict') return null;
+  const body = failure.body as { conflict?: unknown } | null;
+  const parsed = conflictSchema.safeParse(body?.conflict);
+  return parsed.success ? parsed.data : null;
+}
