@@ -47,7 +47,14 @@ export default defineConfig(
   {
     files: ['**/*.mjs', '**/*.cjs'],
     languageOptions: {
-      globals: { process: 'readonly', console: 'readonly', URL: 'readonly', fetch: 'readonly' },
+      globals: {
+        process: 'readonly',
+        console: 'readonly',
+        URL: 'readonly',
+        fetch: 'readonly',
+        setInterval: 'readonly',
+        performance: 'readonly',
+      },
     },
   },
   { files: ['**/*.cjs'], languageOptions: { globals: { module: 'writable' } } },

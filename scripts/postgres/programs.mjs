@@ -63,6 +63,8 @@ export function runAs(path, parameters, { account, environment = {}, output = 'k
   return new Promise((resolve, reject) => {
     const child = spawn(path, parameters, {
       cwd: '/',
+      // Ctrl-C must not tear an initdb or a stop in two: we see to the end ourselves.
+      detached: true,
       env: cleanEnvironment(environment),
       stdio: output === 'none' ? 'ignore' : ['ignore', 'pipe', 'pipe'],
       ...(root ? { uid: account.uid, gid: account.gid } : {}),

@@ -2,7 +2,7 @@ import { HttpErrorResponse, type HttpInterceptorFn } from '@angular/common/http'
 import { inject, Injector } from '@angular/core';
 import { Router } from '@angular/router';
 import { catchError, from, switchMap, throwError, type Observable } from 'rxjs';
-import type { ApiFailure} from './api-problem';
+import type { ApiFailure } from './api-problem';
 import { apiFailureOf } from './api-problem';
 import { SessionStore } from './session-store';
 
