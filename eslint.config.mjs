@@ -73,6 +73,9 @@ export default defineConfig(
         'error',
         { checksVoidReturn: { arguments: false } },
       ],
+      '@typescript-eslint/no-misused-spread': ['error', { allow: ['string'] }],
+      // Angular's option types are classes that plain objects are meant for.
+      '@typescript-eslint/no-unsafe-class-instance-assignment': 'off',
       '@typescript-eslint/no-unused-vars': ['error', { ignoreRestSiblings: true }],
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
       '@typescript-eslint/switch-exhaustiveness-check': [
