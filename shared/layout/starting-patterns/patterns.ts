@@ -1,0 +1,98 @@
+import type { Grid } from '../cells';
+import {
+  divisorsOf,
+  filled,
+  modulo,
+  nearestFirst,
+  periodOf,
+  woodOfStripe,
+  type Bands,
+  type Checker,
+  type Diamonds,
+  type Helix,
+  type LaidPattern,
+  type Zigzag,
+} from './starting-pattern';
+
+/** A board of fields; meets when the fields of one round of woods divide the staves. */
+export function layChecker(pattern: Checker, grid: Grid): LaidPattern {
+  const { woods, staves, courses } = pattern;
+  const cells = filled(grid, (stave, course) => {
+    const field = Math.floor(stave / staves) + Math.floor(course / courses);
+    return woods[field % woods.length] ?? 0;
+  });
+  const round = staves * woods.length;
+  if (grid.staves % round === 0) return { meets: true, cells };
+  const widths = divisorsOf(grid.staves).filter((w) => grid.staves % (w * woods.length) === 0);
+  return {
+    meets: false,
+    cells,
+    field: 'staves',
+    reason: `Fields of ${staves} in ${woods.length} woods repeat every ${round} staves, which does not divide ${grid.staves}.`,
+    offers: nearestFirst(widths, staves),
+  };
+}
+
+/** Level bands from the bottom; they always meet. */
+export function layBands(pattern: Bands, grid: Grid): LaidPattern {
+  return { meets: true, cells: filled(grid, (_, course) => woodOfStripe(pattern.stripes, course)) };
+}
+
+/** Stripes that climb; meets when one turn climbs a whole number of stripe rounds. */
+export function layHelix(pattern: Helix, grid: Grid): LaidPattern {
+  const { stripes, lead } = pattern;
+  const climbed = (stave: number) => Math.floor((stave * lead) / grid.staves + 1e-9);
+  const cells = filled(grid, (stave, course) => woodOfStripe(stripes, course - climbed(stave)));
+  const round = periodOf(stripes);
+  if (Number.isInteger(lead) && modulo(lead, round) === 0) return { meets: true, cells };
+  const hand = lead < 0 ? -1 : 1;
+  const leads = [1, 2, 3, 4, 5, 6, 7, 8].map((turns) => hand * turns * round);
+  return {
+    meets: false,
+    cells,
+    field: 'lead',
+    reason: `A lead of ${lead} courses a turn does not meet at the seam: the stripes repeat every ${round} courses.`,
+    offers: nearestFirst(leads, lead),
+  };
+}
+
+/** Diamonds standing on their points; meets when their width divides the staves. */
+export function layDiamonds(pattern: Diamonds, grid: Grid): LaidPattern {
+  const { ground, diamond, staves, courses, drawn } = pattern;
+  const cells = filled(grid, (stave, course) => {
+    const across = Math.abs(modulo(stave, staves) + 0.5 - staves / 2) / (staves / 2);
+    const up = Math.abs(modulo(course, courses) + 0.5 - courses / 2) / (courses / 2);
+    const from = across + up;
+    // one tile is worth this much of the way from the middle to the edge
+    const rim = 2 / Math.max(staves, courses);
+    const inside = from <= 1 + rim / 4;
+    return inside && (drawn === 'filled' || from > 1 - rim + 1e-9) ? diamond : ground;
+  });
+  return dividing(grid, staves, 'Diamonds', cells);
+}
+
+/** Stripes that rise and fall; meets when the crests divide the staves. */
+export function layZigzag(pattern: Zigzag, grid: Grid): LaidPattern {
+  const { stripes, staves, rise } = pattern;
+  const height = (stave: number) => {
+    const along = modulo(stave, staves);
+    const toCrest = Math.min(along, staves - along) / (staves / 2);
+    return Math.round(toCrest * rise);
+  };
+  const cells = filled(grid, (stave, course) => woodOfStripe(stripes, course - height(stave)));
+  return dividing(grid, staves, 'Crests', cells);
+}
+
+function dividing(grid: Grid, period: number, what: string, cells: Uint8Array): LaidPattern {
+  if (grid.staves % period === 0) return { meets: true, cells };
+  return {
+    meets: false,
+    cells,
+    field: 'staves',
+    reason: `${what} every ${period} staves do not divide ${grid.staves} staves.`,
+    offers: nearestFirst(
+      divisorsOf(grid.staves).filter((d) => d > 1),
+      period,
+    ),
+  };
+}
