@@ -104,6 +104,8 @@ export default defineConfig(
         { type: 'element', prefix: 'sl', style: 'kebab-case' },
       ],
       '@angular-eslint/prefer-signals': 'error',
+      // Angular's and Material's options are classes that are always given as object literals.
+      '@typescript-eslint/no-unsafe-class-instance-assignment': 'off',
     },
   },
   {

@@ -3,12 +3,15 @@ import { Component, computed, input } from '@angular/core';
 // Every ground carries white initials at 4.5:1 or better.
 const GROUNDS = ['#7a5a9e', '#0a6b73', '#2a4b78', '#8a5200', '#8c3b4a', '#3f6b45'] as const;
 
+/** A letter with the marks that belong to it. */
+const FIRST_LETTER = /^\P{M}\p{M}*/u;
+
 /** First letters of the first and the last word of a name. */
 export function initialsOf(name: string): string {
   const words = name.trim().split(/\s+/u);
-  const first = [...(words[0] ?? '')][0] ?? '';
-  const last = words.length > 1 ? ([...(words.at(-1) ?? '')][0] ?? '') : '';
-  return (first + last).toUpperCase();
+  const letters = words.map((word) => FIRST_LETTER.exec(word)?.[0] ?? '');
+  const last = letters.length > 1 ? (letters.at(-1) ?? '') : '';
+  return ((letters[0] ?? '') + last).toUpperCase();
 }
 
 /** A person as a disc with initials, always in the same colour. */

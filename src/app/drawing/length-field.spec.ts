@@ -29,7 +29,7 @@ describe('a length field', () => {
   let fixture: ComponentFixture<Bench>;
   const input = () => (fixture.nativeElement as HTMLElement).querySelector('input')!;
   const error = () =>
-    (fixture.nativeElement as HTMLElement).querySelector('mat-error')?.textContent?.trim();
+    (fixture.nativeElement as HTMLElement).querySelector('mat-error')?.textContent.trim();
 
   async function type(text: string): Promise<void> {
     input().value = text;

@@ -42,6 +42,10 @@ export class LengthInput implements ControlValueAccessor, Validator {
   private changed: (value: Millimetres | null) => void = () => undefined;
   private touched: () => void = () => undefined;
 
+  readonly setDisabledState: NonNullable<ControlValueAccessor['setDisabledState']> = (disabled) => {
+    this.element.disabled = disabled;
+  };
+
   constructor() {
     effect(() => this.show(this.lengthUnit()));
   }
@@ -58,10 +62,6 @@ export class LengthInput implements ControlValueAccessor, Validator {
 
   registerOnTouched(touched: () => void): void {
     this.touched = touched;
-  }
-
-  setDisabledState(disabled: boolean): void {
-    this.element.disabled = disabled;
   }
 
   validate(): ValidationErrors | null {

@@ -2,7 +2,7 @@ import { Component, input } from '@angular/core';
 
 const WEDGES = 12;
 const OUTER = 15;
-const INNER = 8.6;
+const INNER = 8;
 
 /** Corner of a ring of radius `radius` at `turn` (share of the whole circle), clockwise from the top. */
 function corner(radius: number, turn: number): string {

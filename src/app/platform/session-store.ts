@@ -3,6 +3,7 @@ import { computed, inject, Injectable, signal } from '@angular/core';
 import { may, type Right } from '@shared/api/rights';
 import type { Person, Session, SignIn } from '@shared/api/session';
 import { firstValueFrom } from 'rxjs';
+import { apiFailureOf } from './api-problem';
 
 /** Who is signed in, asked once at start and kept as a signal. */
 @Injectable({ providedIn: 'root' })
@@ -32,8 +33,15 @@ export class SessionStore {
 
   /** Signs in; rejects with an ApiFailure ("wrong-credentials", "too-many-requests", …). */
   async signIn(credentials: SignIn): Promise<Person | null> {
-    const session = await firstValueFrom(this.http.post<Session>('/api/session', credentials));
-    return this.remember(session.person);
+    const ask = () => firstValueFrom(this.http.post<Session>('/api/session', credentials));
+    try {
+      return this.remember((await ask()).person);
+    } catch (thrown) {
+      if (apiFailureOf(thrown).code !== 'forged-request') throw thrown;
+      // The page stood open longer than its token lived: fetch a new one and ask once more.
+      await this.ask();
+      return this.remember((await ask()).person);
+    }
   }
 
   /** Ends the session on the server, then here; rejects with an ApiFailure and stays signed in. */
