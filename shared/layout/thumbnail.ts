@@ -1,6 +1,14 @@
-import type { Thumbnail } from '../api/commission';
 import { encodeCells } from './cells';
 import type { Layout } from './schema';
+
+/** The picture as it travels (see api/commission.ts): sampled tiles, each the index of a colour. */
+export interface Thumbnail {
+  readonly staves: number;
+  readonly courses: number;
+  readonly colours: string[];
+  /** base64, one byte a tile, course by course from the bottom */
+  readonly cells: string;
+}
 
 /** A thumbnail shows at most this many tiles across and up; larger patterns are sampled. */
 const STAVES_MOST = 48;

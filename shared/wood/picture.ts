@@ -4,8 +4,8 @@
  * stave is carried into the first of the next courses, and the ordered pattern repeats in whole rounds.
  */
 import type { Lab65 } from 'culori/fn';
-import { colourDifference, labOf, labOfRgb } from '../wood/contrast';
-import type { Grid } from './cells';
+import { colourDifference, labOf, labOfRgb } from './contrast';
+import type { Grid } from '../layout/cells';
 
 export const DITHERINGS = ['plain', 'ordered', 'error-diffusion'] as const;
 export type Dithering = (typeof DITHERINGS)[number];
