@@ -55,7 +55,7 @@ function lineTypeTable(): Group[] {
 }
 
 function layerTable({ layers }: DxfDrawing): Group[] {
-  const named = layers.map((name) => ({ name: name as string, colour: LAYER_COLOURS[name] }));
+  const named = layers.map((name) => ({ name, colour: LAYER_COLOURS[name] }));
   const records = [{ name: '0', colour: 7 }, ...named].flatMap(({ name, colour }): Group[] => [
     [0, 'LAYER'],
     [2, name],
