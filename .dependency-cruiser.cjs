@@ -43,7 +43,7 @@ function mayImport(from, may, besides) {
 }
 
 /** @param {string[]} names npm packages */
-const packages = (names) => `^node_modules/(@types/)?${oneOf(names)}(/|$)`;
+const packages = (names) => `(^|(^|/)node_modules/(@types/)?)${oneOf(names)}(/|$)`;
 
 /** @type {import('dependency-cruiser').IConfiguration} */
 module.exports = {

@@ -52,7 +52,7 @@ export default defineConfig({
         test: {
           name: 'browser',
           include: ['tests/e2e/**/*.spec.ts'],
-          globalSetup: ['tests/database-setup.ts'],
+          globalSetup: ['tests/database-setup.ts', 'tests/e2e/built-setup.ts'],
           testTimeout: 180_000,
           hookTimeout: 120_000,
           fileParallelism: false,

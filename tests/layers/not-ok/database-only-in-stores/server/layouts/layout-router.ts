@@ -1,0 +1,3 @@
+import type * as pack from 'drizzle-orm';
+
+export type Pack = typeof pack;

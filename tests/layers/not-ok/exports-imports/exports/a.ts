@@ -1,0 +1,3 @@
+import type { x } from '../drizzle/b';
+
+export type X = typeof x;

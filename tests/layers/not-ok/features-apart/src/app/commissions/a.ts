@@ -1,0 +1,3 @@
+import type { x } from '../sign-in/b';
+
+export type X = typeof x;

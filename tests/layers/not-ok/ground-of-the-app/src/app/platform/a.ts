@@ -1,0 +1,3 @@
+import type { x } from '../frame/b';
+
+export type X = typeof x;

@@ -1,0 +1,3 @@
+import type * as pack from 'konva';
+
+export type Pack = typeof pack;

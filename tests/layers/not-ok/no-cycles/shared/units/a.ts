@@ -1,0 +1,5 @@
+import type { B } from './b';
+
+export interface A {
+  readonly b?: B;
+}

@@ -1,0 +1,5 @@
+import type { A } from './a';
+
+export interface B {
+  readonly a?: A;
+}

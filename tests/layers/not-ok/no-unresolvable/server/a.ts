@@ -1,0 +1,3 @@
+import type * as pack from './nowhere';
+
+export type Pack = typeof pack;

@@ -1,0 +1,3 @@
+import * as pack from 'fast-check';
+
+export const check = pack.check;

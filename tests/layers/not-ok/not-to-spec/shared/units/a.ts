@@ -1,0 +1,3 @@
+import type { x } from './b.spec';
+
+export type X = typeof x;

@@ -1,0 +1,3 @@
+import type * as pack from 'node:fs';
+
+export type Pack = typeof pack;

@@ -1,0 +1,3 @@
+import type { x } from '../server/b';
+
+export type X = typeof x;

@@ -1,0 +1,3 @@
+import type { x } from '../seeds/b';
+
+export type X = typeof x;

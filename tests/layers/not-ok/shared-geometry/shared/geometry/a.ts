@@ -1,0 +1,3 @@
+import type { x } from '../pieces/b';
+
+export type X = typeof x;

@@ -1,0 +1,3 @@
+import type { x } from '../shell/b';
+
+export type X = typeof x;

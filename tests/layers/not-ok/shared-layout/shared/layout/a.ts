@@ -1,0 +1,3 @@
+import type { x } from '../api/b';
+
+export type X = typeof x;

@@ -1,0 +1,3 @@
+import type { x } from '../checks/b';
+
+export type X = typeof x;

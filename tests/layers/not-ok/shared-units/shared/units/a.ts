@@ -1,0 +1,3 @@
+import type { x } from '../geometry/b';
+
+export type X = typeof x;

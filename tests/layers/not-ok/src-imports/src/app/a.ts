@@ -1,0 +1,3 @@
+import type { x } from '../../exports/dxf/b';
+
+export type X = typeof x;

@@ -1,0 +1,3 @@
+import type * as pack from '@svgdotjs/svg.js';
+
+export type Pack = typeof pack;

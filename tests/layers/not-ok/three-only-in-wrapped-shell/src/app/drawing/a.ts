@@ -1,0 +1,3 @@
+import type * as pack from 'three';
+
+export type Pack = typeof pack;
