@@ -1,0 +1,40 @@
+import { describe, expect, it } from 'vitest';
+import { readConfig } from './config';
+
+const least = {
+  DATABASE_URL: 'postgres://someone@127.0.0.1:5432/staveloom',
+  SESSION_SECRET: 'thirty-two characters and no less',
+};
+
+describe('the environment at start', () => {
+  it('needs only the database and a secret', () => {
+    expect(readConfig(least)).toMatchObject({
+      ok: true,
+      config: { host: '127.0.0.1', port: 3000, trustProxy: false, sessionHours: 12 },
+    });
+  });
+
+  it('takes port 0, so that the system chooses a free one', () => {
+    expect(readConfig({ ...least, PORT: '0' })).toMatchObject({ ok: true, config: { port: 0 } });
+  });
+
+  it.each([
+    [{ SESSION_SECRET: 'short' }, 'SESSION_SECRET must be at least 32 characters long.'],
+    [{ SESSION_SECRET: undefined }, 'SESSION_SECRET must be set; it must be at least 32 characters long.'],
+    [{ DATABASE_URL: undefined }, 'DATABASE_URL must be set to a postgres:// address.'],
+    [{ DATABASE_URL: 'mysql://x' }, 'DATABASE_URL must be a postgres:// address.'],
+    [{ PORT: '65536' }, 'PORT must be a whole number from 0 to 65535.'],
+    [{ PORT: 'abc' }, 'PORT must be a whole number from 0 to 65535.'],
+    [{ SESSION_HOURS: '0' }, 'SESSION_HOURS must be a whole number from 1 to 720.'],
+    [{ NODE_ENV: 'prod' }, 'NODE_ENV must be "development", "production" or "test".'],
+  ])('refuses %o with one sentence that names variable and bound', (change, sentence) => {
+    expect(readConfig({ ...least, ...change })).toEqual({ ok: false, sentence });
+  });
+
+  it('counts proxies, or takes their addresses', () => {
+    expect(readConfig({ ...least, TRUST_PROXY: '1' })).toMatchObject({ config: { trustProxy: 1 } });
+    expect(readConfig({ ...least, TRUST_PROXY: 'loopback' })).toMatchObject({
+      config: { trustProxy: 'loopback' },
+    });
+  });
+});
