@@ -94,7 +94,8 @@ export const API_ROUTES = {
   editLayout: {
     method: 'patch',
     path: '/layouts/:id',
-    summary: 'Save an edit; edits made elsewhere since its base revision merge unless both touch a place',
+    summary:
+      'Save an edit; edits made elsewhere since its base revision merge unless both touch a place',
     access: { anyOf: ['edit-pattern', 'edit-joint'] },
     body: editSchema,
     bodyLimit: 'layout',

@@ -20,7 +20,10 @@ describe('the environment at start', () => {
 
   it.each([
     [{ SESSION_SECRET: 'short' }, 'SESSION_SECRET must be at least 32 characters long.'],
-    [{ SESSION_SECRET: undefined }, 'SESSION_SECRET must be set; it must be at least 32 characters long.'],
+    [
+      { SESSION_SECRET: undefined },
+      'SESSION_SECRET must be set; it must be at least 32 characters long.',
+    ],
     [{ DATABASE_URL: undefined }, 'DATABASE_URL must be set to a postgres:// address.'],
     [{ DATABASE_URL: 'mysql://x' }, 'DATABASE_URL must be a postgres:// address.'],
     [{ PORT: '65536' }, 'PORT must be a whole number from 0 to 65535.'],

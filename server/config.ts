@@ -4,24 +4,26 @@ import * as z from 'zod';
 const SECRET_BOUND = 'must be at least 32 characters long';
 
 const environmentSchema = z.object({
-  NODE_ENV: z.enum(['development', 'production', 'test'], {
-    error: 'must be "development", "production" or "test"',
-  }).default('production'),
+  NODE_ENV: z
+    .enum(['development', 'production', 'test'], {
+      error: 'must be "development", "production" or "test"',
+    })
+    .default('production'),
   DATABASE_URL: z
     .string({ error: 'must be set to a postgres:// address' })
     .regex(/^postgres(ql)?:\/\//, 'must be a postgres:// address'),
   DATABASE_CONNECTIONS: wholeNumber(1, 100).default(10),
   HOST: z.string().min(1, 'must not be empty').default('127.0.0.1'),
   PORT: wholeNumber(0, 65_535).default(3000),
-  SESSION_SECRET: z
-    .string({ error: `must be set; it ${SECRET_BOUND}` })
-    .min(32, SECRET_BOUND),
+  SESSION_SECRET: z.string({ error: `must be set; it ${SECRET_BOUND}` }).min(32, SECRET_BOUND),
   SESSION_HOURS: wholeNumber(1, 720).default(12),
   /** How many proxies stand in front, or their addresses as Express takes them; "false" for none. */
   TRUST_PROXY: z.string().min(1, 'must not be empty').default('false'),
-  LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'], {
-    error: 'must be one of fatal, error, warn, info, debug, trace, silent',
-  }).default('info'),
+  LOG_LEVEL: z
+    .enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'], {
+      error: 'must be one of fatal, error, warn, info, debug, trace, silent',
+    })
+    .default('info'),
   APP_FOLDER: z.string().min(1, 'must not be empty').default('dist/app/browser'),
 });
 

@@ -9,8 +9,8 @@
  *
  * The log keeps every edit: any base revision that a browser may still hold can be merged from it.
  */
-import type { Thumbnail } from '@shared/api/commission';
 import type { WirePatch } from '@shared/api/layout';
+import type { LayoutSummary } from '@shared/api/layout-summary';
 import type { LayoutFile } from '@shared/layout/schema';
 import {
   integer,
@@ -24,15 +24,6 @@ import {
 } from 'drizzle-orm/pg-core';
 import { commissions } from './commissions';
 import { people } from './people';
-
-/** What the table of commissions shows of a layout. */
-export interface LayoutSummary {
-  readonly staves: number;
-  readonly courses: number;
-  /** Names of the woods laid, most tiles first. */
-  readonly woods: string[];
-  readonly thumbnail: Thumbnail;
-}
 
 export const layouts = pgTable('layouts', {
   id: uuid('id').primaryKey().defaultRandom(),

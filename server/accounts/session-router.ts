@@ -1,15 +1,14 @@
-import type { Authenticator } from 'passport';
 import type { RequestHandler } from 'express';
 import { API_ROUTES } from '../api-routes';
 import { ApiError } from '../http/errors';
 import type { RouteMount } from '../http/route';
 import { SESSION_COOKIE } from '../http/session';
-import { authenticate, beginSession, endSession } from './sign-in';
+import { authenticate, beginSession, endSession, type SignInPassport } from './sign-in';
 
 /** Who is signed in, signing in and signing out. */
 export function mountSession(
   mount: RouteMount,
-  passport: Authenticator,
+  passport: SignInPassport,
   signInLimits: readonly RequestHandler[],
 ): void {
   mount(API_ROUTES.whoIsSignedIn, ({ person }) => ({ person }));

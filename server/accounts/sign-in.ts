@@ -1,14 +1,16 @@
 import type { Database } from '@drizzle/database';
 import type { Person } from '@shared/api/session';
 import type { Request } from 'express';
-import { Passport, type Authenticator } from 'passport';
+import passports from 'passport';
 import { Strategy } from 'passport-local';
 import { findCredentials, findPerson } from './people-store';
 import { passwordMatches } from './passwords';
 
+export type SignInPassport = InstanceType<typeof passports.Passport>;
+
 /** Passport with e-mail and password; the session holds only the person's id, roles are read anew each time. */
-export function createPassport(database: Database): Authenticator {
-  const passport = new Passport();
+export function createPassport(database: Database): SignInPassport {
+  const passport = new passports.Passport();
   passport.use(
     new Strategy({ usernameField: 'email' }, (email, password, done) => {
       personOf(database, email, password).then((person) => done(null, person ?? false), done);
@@ -32,7 +34,7 @@ async function personOf(
 }
 
 /** The person whose e-mail and password the body holds, or null. */
-export function authenticate(passport: Authenticator, request: Request): Promise<Person | null> {
+export function authenticate(passport: SignInPassport, request: Request): Promise<Person | null> {
   return new Promise((resolve, reject) => {
     const answer = (error: unknown, person: Person | false) =>
       error ? reject(error) : resolve(person || null);

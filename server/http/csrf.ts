@@ -42,7 +42,8 @@ export function createCsrfGuard(secret: string): CsrfGuard {
     demand: (request) => {
       const inHeader = request.get(CSRF_HEADER);
       const inCookie = cookieOf(request, CSRF_COOKIE);
-      if (inHeader && inCookie && equalText(inHeader, inCookie) && isGood(inHeader, request)) return;
+      if (inHeader && inCookie && equalText(inHeader, inCookie) && isGood(inHeader, request))
+        return;
       throw new ApiError(
         'forged-request',
         'This request did not come with the page’s token. Load the page again and repeat it.',

@@ -60,7 +60,10 @@ function sentenceOf([first, ...rest]: readonly Problem[]): string {
 
 /** Answers every API path nobody else answered. */
 export const noSuchRoute: RequestHandler = (request) => {
-  throw new ApiError('not-found', `There is no ${request.method} ${request.baseUrl}${request.path}.`);
+  throw new ApiError(
+    'not-found',
+    `There is no ${request.method} ${request.baseUrl}${request.path}.`,
+  );
 };
 
 /** The last handler: turns whatever was thrown into an `ApiProblem`. */
@@ -107,7 +110,10 @@ function unreadableBody(error: unknown): ApiError | null {
   if (!(error instanceof Error) || !('type' in error) || !('status' in error)) return null;
   if (error.type === 'entity.too.large') {
     const limit = 'limit' in error ? Math.floor(Number(error.limit) / 1024) : 0;
-    return new ApiError('too-large', `The request is too large: at most ${limit} kB are taken here.`);
+    return new ApiError(
+      'too-large',
+      `The request is too large: at most ${limit} kB are taken here.`,
+    );
   }
   const client = typeof error.status === 'number' && error.status >= 400 && error.status < 500;
   return client ? badInput([{ field: '', message: 'must be JSON in UTF-8' }]) : null;

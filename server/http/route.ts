@@ -60,7 +60,9 @@ export interface RouteCall<R extends RouteDeclaration> {
   readonly request: Request;
 }
 
-type AnswerOf<R extends RouteDeclaration> = R['answer'] extends { schema: infer S extends z.ZodType }
+type AnswerOf<R extends RouteDeclaration> = R['answer'] extends {
+  schema: infer S extends z.ZodType;
+}
   ? z.input<S>
   : R['answer'] extends { file: string }
     ? FileAnswer
@@ -104,7 +106,10 @@ export function mountOn(router: Router, csrf: CsrfGuard): RouteMount {
 
 function demandAccess(route: RouteDeclaration, request: Request, csrf: CsrfGuard): void {
   if (route.access !== 'anyone' && !request.user) {
-    throw new ApiError('not-signed-in', 'You are not signed in, or were away too long. Sign in again.');
+    throw new ApiError(
+      'not-signed-in',
+      'You are not signed in, or were away too long. Sign in again.',
+    );
   }
   if (route.method !== 'get') csrf.demand(request);
   if (route.access !== 'anyone') demandRight(request.user as Person, route.access.anyOf);

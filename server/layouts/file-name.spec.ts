@@ -1,0 +1,13 @@
+import { expect, it } from 'vitest';
+import { layoutFileName } from './file-name';
+
+it.each([
+  ['Ferry-hall lantern', 'ferry-hall-lantern.json'],
+  ['Stair planter, tall', 'stair-planter-tall.json'],
+  ['  Ångström & Söhne ', 'angstrom-sohne.json'],
+  ['../../etc/passwd', 'etc-passwd.json'],
+  ['=cmd|"x"', 'cmd-x.json'],
+  ['…', 'layout.json'],
+])('the layout %o is saved as %o', (name, fileName) => {
+  expect(layoutFileName(name, '.json')).toBe(fileName);
+});

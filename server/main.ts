@@ -1,0 +1,48 @@
+/** Starts the server: configuration, database, app; ends it cleanly when asked. */
+import { createServer } from 'node:http';
+import type { AddressInfo } from 'node:net';
+import { openDatabase } from '@drizzle/database';
+import { createApp } from './app';
+import { readConfig, type Config } from './config';
+import { createLogger } from './http/request-log';
+
+/** Requests still running when the server is asked to end get this long. */
+const LAST_REQUESTS_MS = 10_000;
+
+function start(config: Config): void {
+  const logger = createLogger(config.logLevel);
+  const open = openDatabase(config.databaseUrl, {
+    connections: config.databaseConnections,
+    onConnectionLost: (error) => logger.warn({ err: error }, 'a database connection was lost'),
+  });
+  const server = createServer(createApp({ config, open, logger }));
+
+  server.on('error', (error) => {
+    console.error(`The server cannot listen on ${config.host}:${config.port}: ${error.message}.`);
+    process.exit(1);
+  });
+  server.listen(config.port, config.host, () => {
+    const { address, port, family } = server.address() as AddressInfo;
+    const host = family === 'IPv6' ? `[${address}]` : address;
+    logger.info({ url: `http://${host}:${port}` }, 'listening');
+  });
+
+  const end = (signal: NodeJS.Signals): void => {
+    logger.info({ signal }, 'ending');
+    server.close(() => {
+      void open.close().finally(() => process.exit(0));
+    });
+    server.closeIdleConnections();
+    setTimeout(() => server.closeAllConnections(), LAST_REQUESTS_MS).unref();
+  };
+  process.once('SIGTERM', end);
+  process.once('SIGINT', end);
+}
+
+const read = readConfig(process.env);
+if (read.ok) {
+  start(read.config);
+} else {
+  console.error(read.sentence);
+  process.exit(1);
+}
