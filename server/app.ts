@@ -1,6 +1,6 @@
 import type { OpenDatabase } from '@drizzle/database';
 import compression from 'compression';
-import express, { type Express, type Router } from 'express';
+import express, { type Express, type RequestHandler, type Router } from 'express';
 import type { Logger } from 'pino';
 import { mountSession } from './accounts/session-router';
 import { createPassport } from './accounts/sign-in';
@@ -53,7 +53,8 @@ function api({ config, open, logger }: AppDependencies): Router {
 
   const passport = createPassport(open.database);
   const csrf = createCsrfGuard(config.sessionSecret);
-  router.use(sessions(config, open.pool, logger), passport.session(), (request, response, next) => {
+  router.use(sessions(config, open.pool, logger));
+  router.use(passport.session() as RequestHandler, (request, response, next) => {
     csrf.hand(request, response);
     next();
   });

@@ -29,5 +29,6 @@ export function mountSession(
   mount(API_ROUTES.signOut, async ({ request }) => {
     await endSession(request);
     request.res?.clearCookie(SESSION_COOKIE);
+    return undefined;
   });
 }

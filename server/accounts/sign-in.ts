@@ -35,23 +35,34 @@ async function personOf(
 
 /** The person whose e-mail and password the body holds, or null. */
 export function authenticate(passport: SignInPassport, request: Request): Promise<Person | null> {
-  return new Promise((resolve, reject) => {
-    const answer = (error: unknown, person: Person | false) =>
-      error ? reject(error) : resolve(person || null);
-    passport.authenticate('local', { session: false }, answer)(request, request.res, reject);
+  return settled((done) => {
+    const authenticating = passport.authenticate('local', { session: false }, done) as (
+      request: Request,
+      response: unknown,
+      next: (error: unknown) => void,
+    ) => void;
+    authenticating(request, request.res, done);
   });
 }
 
 /** Begins a session for the person under a new id; whatever session there was before is destroyed. */
-export function beginSession(request: Request, person: Person): Promise<void> {
-  return new Promise((resolve, reject) => {
-    request.logIn(person, (error: unknown) => (error ? reject(error) : resolve()));
-  });
+export async function beginSession(request: Request, person: Person): Promise<void> {
+  await settled((done) => request.logIn(person, done));
 }
 
 /** Ends the session, here and in the database. */
-export function endSession(request: Request): Promise<void> {
+export async function endSession(request: Request): Promise<void> {
+  await settled((done) => request.logOut(done));
+}
+
+type Done<T> = (error: unknown, value?: T | false) => void;
+
+/** What a function with a callback at its end answers; null when it answers nothing. */
+function settled<T>(begin: (done: Done<T>) => void): Promise<T | null> {
   return new Promise((resolve, reject) => {
-    request.logOut((error: unknown) => (error ? reject(error) : resolve()));
+    begin((error, value) => {
+      if (error === null || error === undefined) resolve(value || null);
+      else reject(error instanceof Error ? error : new Error('passport failed', { cause: error }));
+    });
   });
 }

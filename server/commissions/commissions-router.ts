@@ -54,9 +54,9 @@ function layoutIn(file: unknown): Layout {
 }
 
 /** Nothing but taking it out can be done to an archived commission; saying "archived" again is harmless. */
-function takesOut(changes: CommissionChanges): boolean {
-  const asked = Object.values(changes).filter((value) => value !== undefined);
-  return changes.archived === false || (changes.archived === true && asked.length === 1);
+function takesOut({ archived, ...others }: CommissionChanges): boolean {
+  if (archived === undefined) return false;
+  return !archived || Object.keys(others).length === 0;
 }
 
 async function commissionNamed(

@@ -5,7 +5,7 @@
  */
 import type { ApiProblem, ApiProblemCode } from '@shared/api/problem';
 import type { Problem } from '@shared/layout/schema';
-import type { ErrorRequestHandler, Request, RequestHandler, Response } from 'express';
+import type { ErrorRequestHandler, RequestHandler, Response } from 'express';
 import { databaseIsAway } from './database-away';
 
 const STATUS: Record<ApiProblemCode, number> = {
@@ -76,16 +76,16 @@ export const answerError: ErrorRequestHandler = (error: unknown, request, respon
   if (refusal.code === 'failed' || refusal.code === 'unavailable') {
     request.log.error({ err: error }, refusal.code);
   }
-  answerProblem(request, response, refusal);
+  answerProblem(response, refusal);
 };
 
 /** Sends a refusal as JSON with its status. */
-export function answerProblem(request: Request, response: Response, refusal: ApiError): void {
+export function answerProblem(response: Response, refusal: ApiError): void {
   const problem: ApiProblem = {
     code: refusal.code,
     message: refusal.message,
     ...(refusal.fields && { fields: [...refusal.fields] }),
-    requestId: String(request.id),
+    requestId: response.get('X-Request-Id') ?? '',
   };
   if (refusal.code === 'unavailable') response.set('Retry-After', '5');
   response.status(statusOf(refusal.code)).json({ ...problem, ...refusal.extra });

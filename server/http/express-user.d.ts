@@ -3,6 +3,8 @@ import type { Person } from '@shared/api/session';
 declare global {
   namespace Express {
     /** What passport puts on a request: the person signed in, as the session answers them. */
-    interface User extends Person {}
+    interface User extends Readonly<Person> {
+      readonly id: Person['id'];
+    }
   }
 }

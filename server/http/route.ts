@@ -66,7 +66,7 @@ type AnswerOf<R extends RouteDeclaration> = R['answer'] extends {
   ? z.input<S>
   : R['answer'] extends { file: string }
     ? FileAnswer
-    : void;
+    : undefined;
 
 export type RouteHandler<R extends RouteDeclaration> = (
   call: RouteCall<R>,

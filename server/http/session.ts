@@ -1,6 +1,6 @@
+import type { OpenDatabase } from '@drizzle/database';
 import connectPgSimple from 'connect-pg-simple';
 import session from 'express-session';
-import type { Pool } from 'pg';
 import type { Logger } from 'pino';
 import type { Config } from '../config';
 
@@ -10,7 +10,7 @@ export const SESSION_COOKIE = 'staveloom.sid';
  * Sessions in PostgreSQL, so that any server process can answer any request. Nobody gets one before signing
  * in. The cookie is marked secure as soon as the request came in over HTTPS (through a trusted proxy too).
  */
-export function sessions(config: Config, pool: Pool, logger: Logger) {
+export function sessions(config: Config, pool: OpenDatabase['pool'], logger: Logger) {
   const PostgresStore = connectPgSimple(session);
   return session({
     name: SESSION_COOKIE,

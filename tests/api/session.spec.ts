@@ -1,3 +1,4 @@
+import { commissionListSchema } from '@shared/api/commission';
 import { sessionSchema } from '@shared/api/session';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { Browser, runningApp, signedIn, type RunningApp } from './running-app';
@@ -29,6 +30,6 @@ describe('looking in', () => {
   it('lists commissions', async () => {
     const browser = await signedIn(running, 'owner');
     const list = await browser.get('/commissions');
-    expect(list.body.commissions).toHaveLength(5);
+    expect(commissionListSchema.parse(list.body).commissions).toHaveLength(5);
   });
 });
