@@ -5,7 +5,7 @@
  */
 import { toRadians, type Radians } from '@shared/units/angle';
 import type { Millimetres } from '@shared/units/length';
-import type { PictureTile, ShellPicture } from './shell-picture';
+import type { PictureTile, ShellPicture } from '../wrapped-shell/shell-picture';
 
 const TILT = toRadians(15);
 const UP = Math.cos(TILT);

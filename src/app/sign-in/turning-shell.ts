@@ -10,7 +10,7 @@ import {
 } from '@angular/core';
 import { demoShell } from './demo-shell';
 import { drawShell } from './draw-shell';
-import { pictureOf } from './shell-picture';
+import { pictureOf } from '../wrapped-shell/shell-picture';
 
 /** One turn takes this long. */
 const TURN_MS = 60_000;

@@ -1,5 +1,5 @@
 /**
- * A shell as the sign-in page draws it: the true outlines of its tiles, flattened once, to be laid on a
+ * A shell for drawings without depth: the true outlines of its tiles, flattened once, to be laid on a
  * turned cylinder. Only a picture: nothing is cut from it.
  */
 import { lengthOf, pointOnCircle, startOf, type Segment } from '@shared/geometry/segment';
