@@ -62,14 +62,14 @@ function arcFlanks(arc: ArcSegment): Flank[] {
   ];
   return angles.slice(1).flatMap((angle, i) => {
     const middle = (angle + (angles[i] as number)) / 2;
-    return arcFlank(arc, heights[i] as number, heights[i + 1] as number, Math.cos(middle) >= 0);
+    return arcFlank(arc, heights[i] as number, heights[i + 1] as number, Math.cos(middle) >= 0 ? 1 : -1);
   });
 }
 
-function arcFlank(arc: ArcSegment, y0: Millimetres, y1: Millimetres, right: boolean): Flank[] {
+/** The half of the circle to the right (1) or left (−1) of its centre, between two heights. */
+function arcFlank(arc: ArcSegment, y0: Millimetres, y1: Millimetres, sign: 1 | -1): Flank[] {
   if (y0 === y1) return [];
   const { centre, radius } = arc;
-  const sign = right ? 1 : -1;
   return [
     {
       low: Math.min(y0, y1),

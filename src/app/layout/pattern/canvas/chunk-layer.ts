@@ -88,7 +88,6 @@ export class ChunkLayer {
     this.view = view;
     this.size = size;
     this.focus = focus;
-    this.layer.setSize(size);
     this.place();
   }
 
@@ -118,15 +117,23 @@ export class ChunkLayer {
   private startGeneration(): void {
     const { scene, view } = this;
     if (!scene || !view) return;
+    this.keepOnePicture();
     this.queue.clear();
-    if (this.former && this.current && this.current.bitmaps.size > 0) this.dropFormer();
-    if (this.former) this.current?.group.destroy();
-    else this.former = this.current;
     const group = new Group({ listening: false });
     this.layer.add(group);
     const raster = chunkRaster(scene.drawing, { pxPerMm: view.pxPerMm, ratio: this.ratio });
     this.current = { raster, group, bitmaps: new Map(), images: new Map() };
     this.place();
+  }
+
+  /** Of two pictures the whole one stays behind the next: an unfinished one only when there is no other. */
+  private keepOnePicture(): void {
+    if (this.former && this.queue.size > 0) {
+      this.current?.group.destroy();
+    } else {
+      this.dropFormer();
+      this.former = this.current;
+    }
   }
 
   private forget(): void {
@@ -172,8 +179,7 @@ export class ChunkLayer {
         const top = origin.y + box.top * stretch;
         const right = left + box.width * stretch;
         const bottom = top + box.height * stretch;
-        const inView =
-          right > 0 && left < this.size.width && bottom > 0 && top < this.size.height;
+        const inView = right > 0 && left < this.size.width && bottom > 0 && top < this.size.height;
         if (!inView) return;
         const dx = Math.max(left - this.focus.x, 0, this.focus.x - right);
         const dy = Math.max(top - this.focus.y, 0, this.focus.y - bottom);

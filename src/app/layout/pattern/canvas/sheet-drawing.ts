@@ -101,9 +101,6 @@ const KIND_NUMBER: Record<EdgeKind, number> = { flat: 0, tab: 1, socket: 2 };
 
 function edgesNumber({ left, right, bottom, top }: TileEdges): number {
   return (
-    KIND_NUMBER[left] +
-    3 * KIND_NUMBER[right] +
-    9 * KIND_NUMBER[bottom] +
-    27 * KIND_NUMBER[top]
+    KIND_NUMBER[left] + 3 * KIND_NUMBER[right] + 9 * KIND_NUMBER[bottom] + 27 * KIND_NUMBER[top]
   );
 }

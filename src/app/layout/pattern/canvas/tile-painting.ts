@@ -35,7 +35,6 @@ export interface Placement {
   readonly ratio: number;
 }
 
-
 export interface PaintedTile {
   readonly stave: number;
   readonly course: number;
@@ -160,7 +159,8 @@ function fillTiles(
 function grainPhases({ tileWidth, tileHeight }: SheetDrawing): DOMMatrix[] {
   const scale = (tileWidth * TEXTURE_TILES) / TEXTURE_PX;
   return [0, 1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12].map(
-    (i) => new DOMMatrix([scale, 0, 0, scale, -tileWidth * (0.5 + i * 0.37), -tileHeight * i * 0.61]),
+    (i) =>
+      new DOMMatrix([scale, 0, 0, scale, -tileWidth * (0.5 + i * 0.37), -tileHeight * i * 0.61]),
   );
 }
 

@@ -7,6 +7,7 @@ import type { Viewport } from './viewport';
 
 export class Underlay {
   readonly group = new Group({ listening: false });
+  private readonly images: Image[] = [];
   private readonly bitmap = document.createElement('canvas');
 
   /** Draws every tile's colour. */
@@ -35,11 +36,10 @@ export class Underlay {
   /** One picture a turn in view. */
   place(drawing: SheetDrawing, view: Viewport, turns: readonly number[]): void {
     const { circumference, height } = drawing.size;
-    const images = this.group.getChildren();
-    while (images.length < turns.length) this.group.add(this.newImage());
-    images.slice(turns.length).forEach((image) => image.destroy());
+    while (this.images.length < turns.length) this.addImage();
+    for (const image of this.images.splice(turns.length)) image.destroy();
     turns.forEach((turn, i) => {
-      images[i]?.setAttrs({
+      this.images[i]?.setAttrs({
         x: (turn * circumference - view.leftMm) * view.pxPerMm,
         y: (view.topMm - height) * view.pxPerMm,
         width: circumference * view.pxPerMm,
@@ -48,7 +48,9 @@ export class Underlay {
     });
   }
 
-  private newImage(): Image {
-    return new Image({ image: this.bitmap, listening: false, perfectDrawEnabled: false });
+  private addImage(): void {
+    const image = new Image({ image: this.bitmap, listening: false, perfectDrawEnabled: false });
+    this.images.push(image);
+    this.group.add(image);
   }
 }

@@ -53,7 +53,7 @@ function wander(context: Context, x: number, swing: number, phase: number): void
 function markColour(colour: string): string {
   const value = Number.parseInt(colour.slice(1), 16);
   const light = 0.299 * (value >> 16) + 0.587 * ((value >> 8) & 255) + 0.114 * (value & 255);
-  return light > 110 ? 'rgb(40 20 0 / 22%)' : 'rgb(255 236 210 / 20%)';
+  return light > 110 ? 'rgb(60 30 0 / 17%)' : 'rgb(255 236 210 / 15%)';
 }
 
 type Scatter = () => number;
@@ -82,14 +82,15 @@ const MARKS: Record<FigureMark, (context: Context, density: number, random: Scat
     context.lineWidth = 2;
     const across = TEXTURE_PX / 4;
     for (let column = 0; column < 4; column++) {
-      for (let i = 0; i < density * 3; i++) arch(context, (column + 0.5) * across, i / (density * 3));
+      for (let i = 0; i < density * 3; i++)
+        arch(context, (column + 0.5) * across, i / (density * 3));
     }
   },
   flecks: (context, density, random) => {
     for (let i = 0; i < density * 90; i++) {
       const y = random() * TEXTURE_PX;
       context.beginPath();
-      context.ellipse(random() * TEXTURE_PX, y, 5 + random() * 4, 1.4, 0, 0, 2 * Math.PI);
+      context.ellipse(random() * TEXTURE_PX, y, 1.8, 8 + random() * 10, 0, 0, 2 * Math.PI);
       context.fill();
     }
   },
@@ -99,12 +100,10 @@ const MARKS: Record<FigureMark, (context: Context, density: number, random: Scat
     for (let i = 0; i < density * 4; i++) context.fillRect(2 * i * width, 0, width, TEXTURE_PX);
     context.globalAlpha = 1;
   },
-  ripple: (context, density) => {
-    context.lineWidth = 5;
-    context.globalAlpha = 0.55;
-    const step = TEXTURE_PX / (density * 8);
-    for (let y = step / 2; y < TEXTURE_PX; y += step) rippleLine(context, y);
-    context.globalAlpha = 1;
+  waves: (context, density) => {
+    context.lineWidth = 2.4;
+    const step = TEXTURE_PX / (density * 10);
+    for (let x = step / 2; x < TEXTURE_PX; x += step) waveLine(context, x);
   },
   specks: (context, density, random) => {
     for (let i = 0; i < density * 140; i++) {
@@ -115,7 +114,7 @@ const MARKS: Record<FigureMark, (context: Context, density: number, random: Scat
   },
   stripes: (context, density) => {
     const step = TEXTURE_PX / (density * 6);
-    for (let x = step / 2; x < TEXTURE_PX; x += step) context.fillRect(x, 0, 5, TEXTURE_PX);
+    for (let x = step / 2; x < TEXTURE_PX; x += step) context.fillRect(x, 0, 4, TEXTURE_PX);
   },
 };
 
@@ -131,10 +130,10 @@ function arch(context: Context, x: number, share: number): void {
   }
 }
 
-function rippleLine(context: Context, y: number): void {
+function waveLine(context: Context, x: number): void {
   context.beginPath();
-  for (let x = 0; x <= TEXTURE_PX; x += 16) {
-    context.lineTo(x, y + 5 * Math.sin((x / TEXTURE_PX) * 12 * Math.PI));
+  for (let y = 0; y <= TEXTURE_PX; y += 8) {
+    context.lineTo(x + 4 * Math.sin((y / TEXTURE_PX) * 16 * Math.PI), y);
   }
   context.stroke();
 }

@@ -10,7 +10,7 @@ export const FIGURE_MARKS = [
   'arches',
   'flecks',
   'ribbon',
-  'ripple',
+  'waves',
   'specks',
   'stripes',
 ] as const;
