@@ -3,7 +3,7 @@ import { OverlayModule, type ConnectedPosition } from '@angular/cdk/overlay';
 import { Component, computed, inject, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router } from '@angular/router';
-import { Avatar } from '../drawing/avatar';
+import { Avatar, initialsOf } from '../drawing/avatar';
 import { ChoiceBar, type Choice } from '../drawing/choice-bar';
 import { Icon } from '../drawing/icon';
 import { Announcer } from '../platform/announcer';
@@ -25,6 +25,7 @@ export class AccountMenu {
   protected readonly theme = inject(Theme);
   protected readonly person = this.session.person;
   protected readonly roles = computed(() => this.session.roles().join(', '));
+  protected readonly initials = computed(() => initialsOf(this.person()?.name ?? ''));
   protected readonly opened = signal(false);
   protected readonly below: ConnectedPosition[] = [
     { originX: 'end', originY: 'bottom', overlayX: 'end', overlayY: 'top', offsetY: 8 },

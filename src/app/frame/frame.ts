@@ -2,7 +2,7 @@ import { NgTemplateOutlet } from '@angular/common';
 import { Component, computed, inject, viewChild, type ElementRef } from '@angular/core';
 import { takeUntilDestroyed, toSignal } from '@angular/core/rxjs-interop';
 import { NavigationEnd, Router, RouterLink, RouterLinkActive, RouterOutlet } from '@angular/router';
-import { filter, map, skip, startWith } from 'rxjs';
+import { distinctUntilChanged, filter, map, skip, startWith } from 'rxjs';
 import { Icon } from '../drawing/icon';
 import { ShellMark } from '../drawing/shell-mark';
 import { BarSlot } from '../platform/bar-slot';
@@ -54,6 +54,8 @@ export class Frame {
     this.arrived
       .pipe(
         map((event) => event.urlAfterRedirects.split(/[?#]/)[0]),
+        distinctUntilChanged(),
+        // The first page is where the browser starts anyway.
         skip(1),
         takeUntilDestroyed(),
       )

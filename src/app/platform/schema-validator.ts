@@ -13,3 +13,9 @@ export function matches(schema: z.ZodType, subject: string): ValidatorFn {
     return { schema: sentenceOf(subject, result.error.issues[0]?.message ?? 'cannot be read') };
   };
 }
+
+/** The same for a field that may be left empty. */
+export function matchesIfGiven(schema: z.ZodType, subject: string): ValidatorFn {
+  const whenGiven = matches(schema, subject);
+  return (control) => (control.value === '' ? null : whenGiven(control));
+}
