@@ -4,7 +4,7 @@ import { element, textElement, xmlFile } from './xml';
 describe('markup', () => {
   it('a name never becomes markup', () => {
     expect(textElement('title', `</title><script>"'&`).markup).toBe(
-      '<title>&lt;/title&gt;&lt;script&gt;&quot;&#39;&amp;</title>',
+      '<title>&lt;/title&gt;&lt;script&gt;&quot;&apos;&amp;</title>',
     );
     expect(element('g', { id: `"><script>` }).markup).toBe('<g id="&quot;&gt;&lt;script&gt;"/>');
   });

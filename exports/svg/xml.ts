@@ -51,7 +51,7 @@ const ENTITIES: Readonly<Record<string, string>> = {
   '<': '&lt;',
   '>': '&gt;',
   '"': '&quot;',
-  "'": '&#39;',
+  "'": '&apos;',
 };
 
 function escapeXml(text: string): string {

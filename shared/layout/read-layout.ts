@@ -87,7 +87,11 @@ export function problemsOfIssue(issue: z.core.$ZodIssue): Problem[] {
       message: 'is not a known key here',
     }));
   }
-  return [{ field: path.join('.') || 'file', message: issue.message }];
+  const field = path.join('.') || 'file';
+  if (issue.code === 'invalid_type' && issue.expected === 'object') {
+    return [{ field, message: 'must be there, as an object' }];
+  }
+  return [{ field, message: issue.message }];
 }
 
 /** Keys come from strangers' files and are repeated in messages: shortened, and without control characters. */

@@ -10,8 +10,8 @@ import { afterAll, describe, expect, it } from 'vitest';
 import type { DxfDrawing } from '@exports/dxf/drawing';
 import { DXF_RELEASES, printDxf, type DxfRelease } from '@exports/dxf/print-dxf';
 import { areaOf, type Outline } from '@shared/geometry/outline';
-import type { ArcSegment } from '@shared/geometry/segment';
 import { fromMillimetres, type LengthUnit } from '@shared/units/length';
+import { drawnArcs } from './drawn-arcs';
 import { readWithEzdxf } from './dxf-readers';
 import { SAMPLE_OUTLINES } from './sample-outlines';
 
@@ -50,14 +50,6 @@ const samples = DXF_RELEASES.flatMap((release) =>
 );
 const readings = readWithEzdxf(samples.map((sample) => sample.path));
 
-/** The arcs a reader must find: none of radius 0, a full turn as two. */
-function arcsOf(outline: Outline): ArcSegment[] {
-  return outline.segments
-    .filter((segment) => segment.kind === 'arc')
-    .filter((segment) => segment.radius > 0)
-    .flatMap((arc) => (Math.abs(arc.sweep) > 6.2 ? [arc, arc] : [arc]));
-}
-
 /** Area inside a polyline with bulges: the chords' and each arc's circular segment. */
 function areaWithin(points: readonly (readonly [number, number, number])[]): number {
   return points.reduce((sum, [x, y, bulge], index) => {
@@ -95,7 +87,7 @@ describe.each(samples.map((sample, index) => ({ ...sample, reading: readings[ind
         layer: 'PART',
         closed: true,
       });
-      const arcs = arcsOf(outline);
+      const arcs = drawnArcs(outline);
       expect(polyline?.arcs).toHaveLength(arcs.length);
       arcs.forEach((arc, index) => {
         const read = polyline?.arcs[index];
