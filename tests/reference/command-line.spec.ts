@@ -222,7 +222,7 @@ describe('bad layout files', () => {
     writeFileSync(path, Buffer.alloc(50 * 1024 * 1024, '['));
     const start = performance.now();
     const { code, errors } = await run(path, freshPlace());
-    expect(performance.now() - start).toBeLessThan(200);
+    expect(performance.now() - start).toBeLessThan(1000);
     expect(code).toBe(2);
     expect(errors).toContain('larger than 1 MiB');
   });
