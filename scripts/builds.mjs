@@ -12,6 +12,7 @@ import {
 import { join } from 'node:path';
 import { runOrRefuse } from './children.mjs';
 import { inProject } from './project.mjs';
+import { Refusal } from './refusal.mjs';
 
 const common = ['package-lock.json', 'tsconfig.json', 'shared', 'exports', 'scripts/builds.mjs'];
 
@@ -80,7 +81,7 @@ export function buildServer() {
     result: serverFile,
     build: async () => {
       const esbuild = await import('esbuild');
-      await esbuild.build({
+      const building = esbuild.build({
         absWorkingDir: inProject(),
         entryPoints: ['server/main.ts'],
         outfile: serverFile,
@@ -92,6 +93,11 @@ export function buildServer() {
         sourcemap: true,
         logLevel: 'warning',
       });
+      await building.catch(() => {
+        throw new Refusal('Building the server failed; the reasons stand above.');
+      });
+      // Its worker process would stay for as long as we run.
+      await esbuild.stop();
     },
   });
 }

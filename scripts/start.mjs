@@ -3,7 +3,6 @@ import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { migrate, seed, useDatabase } from './database.mjs';
 import { atEnd, isEnding, runProgram } from './ending.mjs';
-import { freePortFrom } from './free-port.mjs';
 import { holderOf, tryLock } from './lock.mjs';
 import { runFolder } from './project.mjs';
 import { Refusal } from './refusal.mjs';
@@ -26,8 +25,12 @@ async function start() {
   await migrate(databaseUrl);
   await seed(databaseUrl);
   const log = join(runFolder, 'server.log');
-  const port = await freePortFrom(wishedPort());
-  const server = await startServer({ port, databaseUrl, sessionSecret: sessionSecret(), log });
+  const server = await startServer({
+    port: wishedPort(),
+    databaseUrl,
+    sessionSecret: sessionSecret(),
+    log,
+  });
   writeFileSync(addressFile, server.address);
   atEnd(() => rmSync(addressFile, { force: true }));
   greet(server.address, log);

@@ -24,7 +24,10 @@ function start(config: Config): void {
   server.listen(config.port, config.host, () => {
     const { address, port, family } = server.address() as AddressInfo;
     const host = family === 'IPv6' ? `[${address}]` : address;
-    logger.info({ url: `http://${host}:${port}` }, 'listening');
+    const url = `http://${host}:${port}`;
+    logger.info({ url }, 'listening');
+    // Tells the program that started us, if it left a channel open, that the port is really ours.
+    process.send?.({ listening: url });
   });
 
   const end = (signal: NodeJS.Signals): void => {
