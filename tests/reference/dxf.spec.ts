@@ -12,6 +12,7 @@ import { DXF_RELEASES, printDxf, type DxfRelease } from '@exports/dxf/print-dxf'
 import { areaOf, type Outline } from '@shared/geometry/outline';
 import { fromMillimetres, type LengthUnit } from '@shared/units/length';
 import { drawnArcs } from './drawn-arcs';
+import { dxfVertices } from './dxf-parser-reading';
 import { readWithEzdxf } from './dxf-readers';
 import { SAMPLE_OUTLINES } from './sample-outlines';
 
@@ -128,21 +129,11 @@ describe.each(samples)(
   ({ unit, text, outline }) => {
     it('finds the same closed polyline', () => {
       const read = new DxfParser().parseSync(text);
-      const polylines = read?.entities.filter((entity) => entity.type.endsWith('POLYLINE')) ?? [];
-      expect(polylines).toHaveLength(1);
-      expect(polylines[0]).toMatchObject({ layer: 'PART', shape: true });
       expect(Object.keys(read?.tables.layer.layers ?? {})).toEqual(
         expect.arrayContaining(['PART', 'CENTRE_PATH', 'LABEL', 'BOARD']),
       );
-      const vertices = (polylines[0] as unknown as { vertices: Vertex[] }).vertices;
-      const area = areaWithin(vertices.map(({ x, y, bulge }) => [x, y, bulge ?? 0]));
+      const area = areaWithin(dxfVertices(read));
       expect(area).toBeCloseTo(areaOf(outline) * fromMillimetres(1, unit) ** 2, 6);
     });
   },
 );
-
-interface Vertex {
-  readonly x: number;
-  readonly y: number;
-  readonly bulge?: number;
-}
