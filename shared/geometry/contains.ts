@@ -62,7 +62,12 @@ function arcFlanks(arc: ArcSegment): Flank[] {
   ];
   return angles.slice(1).flatMap((angle, i) => {
     const middle = (angle + (angles[i] as number)) / 2;
-    return arcFlank(arc, heights[i] as number, heights[i + 1] as number, Math.cos(middle) >= 0 ? 1 : -1);
+    return arcFlank(
+      arc,
+      heights[i] as number,
+      heights[i + 1] as number,
+      Math.cos(middle) >= 0 ? 1 : -1,
+    );
   });
 }
 

@@ -1,9 +1,17 @@
 import type { Millimetres, PointMm } from '../units/length';
 import { intersections } from './intersect';
 import { boundsOf, type Bounds } from './outline';
-import { endOf, lengthOf, startOf, type Segment } from './segment';
+import {
+  directionAtStart,
+  endOf,
+  lengthOf,
+  startOf,
+  type ArcSegment,
+  type LineSegment,
+  type Segment,
+} from './segment';
 import { POINT_TOLERANCE } from './tolerance';
-import { distance } from './vector';
+import { cross, distance, subtract } from './vector';
 
 /**
  * Neighbours share an end, and tangent arcs agree there to about 1e-7 mm; what they share within this of
@@ -36,10 +44,29 @@ export function selfCrossing(chain: readonly Segment[]): PointMm | null {
   return null;
 }
 
-/** True when two arcs lie outside each other and overlap by no more than the tolerance. */
+/** True when two segments lie beside each other and overlap by no more than the tolerance. */
 function onlyTouches(a: Segment, b: Segment): boolean {
-  if (a.kind !== 'arc' || b.kind !== 'arc') return false;
-  return distance(a.centre, b.centre) >= a.radius + b.radius - POINT_TOLERANCE;
+  if (a.kind === 'line') return b.kind === 'line' ? linesTouch(a, b) : lineTouchesArc(a, b);
+  if (b.kind === 'line') return lineTouchesArc(b, a);
+  const between = distance(a.centre, b.centre);
+  return (
+    between >= a.radius + b.radius - POINT_TOLERANCE ||
+    between <= Math.abs(a.radius - b.radius) + POINT_TOLERANCE
+  );
+}
+
+/** Lines along each other: two flanks of a mouth exactly as wide as the cutter. */
+function linesTouch(a: LineSegment, b: LineSegment): boolean {
+  return [b.from, b.to].every((point) => heightOver(a, point) <= POINT_TOLERANCE);
+}
+
+function lineTouchesArc(line: LineSegment, arc: ArcSegment): boolean {
+  return heightOver(line, arc.centre) >= arc.radius - POINT_TOLERANCE;
+}
+
+/** Distance of a point from the whole line. */
+function heightOver(line: LineSegment, point: PointMm): Millimetres {
+  return Math.abs(cross(directionAtStart(line), subtract(point, line.from)));
 }
 
 function boxesMeet(a: Bounds, b: Bounds): boolean {
