@@ -30,7 +30,10 @@ export interface CutterFit {
   readonly fits: boolean;
   /** Null when the outline has no inside arc and no inside corner. */
   readonly tightest: TightestInside | null;
-  /** Where the cutter's centre path crosses itself, or null. */
+  /**
+   * Where the cutter's centre path crosses itself, or null. For a cutter too large for an inside radius it
+   * is the path of the largest that is not.
+   */
   readonly crossingAt: PointMm | null;
   /** Greatest diameter that fits, to 0.001 mm and rounded down; Infinity where nothing limits it. */
   readonly largestCutter: Millimetres;
@@ -45,9 +48,11 @@ export function centrePath(outline: Outline, diameter: Millimetres): OffsetResul
 /** Whether a cutter can make the outline, what limits it, and the largest that fits. */
 export function cutterFit(outline: Outline, diameter: Millimetres): CutterFit {
   const tightest = tightestInside(outline);
-  const path = centrePath(outline, diameter);
-  const roundEnough = !tightest || tightest.radius >= diameter / 2 - POINT_TOLERANCE;
-  const crossingAt = !path.ok && path.reason === 'crosses-itself' ? path.at : null;
+  const roundest = tightest ? 2 * tightest.radius : Infinity;
+  const roundEnough = roundest >= diameter - POINT_TOLERANCE;
+  // where an inside radius is too tight already, the widest cutter it allows tells of mouths and gaps
+  const path = centrePath(outline, Math.min(diameter, roundest));
+  const crossingAt = path.ok ? null : path.at;
   return {
     fits: roundEnough && path.ok,
     tightest,
@@ -96,7 +101,7 @@ function largestCutter(
       : { largestCutter: Infinity, limitedBy: 'nothing' };
   }
   let [fits, crosses] = [0, roundest];
-  while (crosses - fits > CUTTER_STEP / 16) {
+  while (crosses - fits > POINT_TOLERANCE) {
     const middle = (fits + crosses) / 2;
     if (centrePath(outline, middle).ok) fits = middle;
     else crosses = middle;
@@ -105,6 +110,6 @@ function largestCutter(
 }
 
 function roundedDown(diameter: Millimetres): Millimetres {
-  // a tenth of a step forgiven, so that a cutter of exactly 3.2 mm is not called 3.199
-  return Math.floor(diameter / CUTTER_STEP + 0.1) * CUTTER_STEP;
+  // the search ends just short of the bound: a cutter of exactly 3.2 mm must not be called 3.199
+  return Math.floor((diameter + 2 * POINT_TOLERANCE) / CUTTER_STEP) * CUTTER_STEP;
 }

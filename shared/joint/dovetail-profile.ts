@@ -10,7 +10,7 @@ import { toDegrees, toRadians } from '../units/angle';
 import type { Millimetres } from '../units/length';
 import type { DovetailParameters } from './parameters';
 import type { ProfileShape } from './profile-shape';
-import type { Refusal } from './refusal';
+import { LEAST_WOOD, SLACK, type Refusal } from './refusal';
 
 interface Corners {
   /** Half widths between the flanks drawn sharp, at the edge line and at the tip. */
@@ -22,51 +22,41 @@ interface Corners {
 }
 
 function cornersOf(parameters: DovetailParameters): Corners {
-  const lean = toRadians(parameters.flankAngle);
-  const perRadius = 1 / Math.tan(Math.PI / 4 - lean / 2);
   const rootHalf = parameters.rootWidth / 2;
   return {
     rootHalf,
-    tipHalf: rootHalf + parameters.reach * Math.tan(lean),
-    rootTangent: parameters.rootRadius * perRadius,
-    tipTangent: parameters.tipRadius * perRadius,
+    tipHalf: rootHalf + parameters.reach * Math.tan(toRadians(parameters.flankAngle)),
+    rootTangent: parameters.rootRadius * perRadius(parameters),
+    tipTangent: parameters.tipRadius * perRadius(parameters),
   };
 }
+
+/** What each millimetre of radius takes off the sides of a corner: 1 / tan(45° − α/2). */
+function perRadius({ flankAngle }: DovetailParameters): number {
+  return 1 / Math.tan(Math.PI / 4 - toRadians(flankAngle) / 2);
+}
+
+/** A root is never narrowed under this by a bound: a narrower one is no joint. */
+const LEAST_ROOT_WIDTH: Millimetres = 0.5;
 
 /** The dovetail tab. Call `dovetailRefusals` first: parameters that do not close give a crossed drawing. */
 export function dovetailShape(parameters: DovetailParameters): ProfileShape {
   const { reach, rootRadius, tipRadius } = parameters;
-  const lean = toRadians(parameters.flankAngle);
   const { rootHalf, tipHalf, rootTangent, tipTangent } = cornersOf(parameters);
   const shoulder = rootHalf + rootTangent;
-  const turn = Math.PI / 2 + lean;
-  const root = (side: -1 | 1): ArcSegment => ({
-    kind: 'arc',
-    centre: { x: side * shoulder, y: rootRadius },
-    radius: rootRadius,
-    startAngle: side < 0 ? -Math.PI / 2 : Math.PI - lean,
-    sweep: turn,
-  });
-  const tip = (side: -1 | 1): ArcSegment => ({
-    kind: 'arc',
-    centre: { x: side * (tipHalf - tipTangent), y: reach - tipRadius },
-    radius: tipRadius,
-    startAngle: side < 0 ? Math.PI + lean : Math.PI / 2,
-    sweep: -turn,
-  });
-  const [rootLeft, tipLeft, tipRight, rootRight] = [root(-1), tip(-1), tip(1), root(1)];
+  const arcs = [
+    rootArc(parameters, -1),
+    tipArc(parameters, -1),
+    tipArc(parameters, 1),
+    rootArc(parameters, 1),
+  ];
   const neck = 2 * (shoulder - rootRadius);
   const headWidth = 2 * (tipHalf - tipTangent + tipRadius);
   return {
-    segments: [
-      rootLeft,
-      ...lineBetween(rootLeft, tipLeft),
-      tipLeft,
-      ...lineBetween(tipLeft, tipRight),
-      tipRight,
-      ...lineBetween(tipRight, rootRight),
-      rootRight,
-    ],
+    segments: arcs.flatMap((arc, i) => {
+      const next = arcs[i + 1];
+      return next ? [arc, ...lineBetween(arc, next)] : [arc];
+    }),
     shoulder,
     reach,
     neck,
@@ -77,9 +67,46 @@ export function dovetailShape(parameters: DovetailParameters): ProfileShape {
   };
 }
 
+/** The fillet at the root, left (−1) or right of the middle. */
+function rootArc(parameters: DovetailParameters, side: -1 | 1): ArcSegment {
+  const lean = toRadians(parameters.flankAngle);
+  const { rootHalf, rootTangent } = cornersOf(parameters);
+  return {
+    kind: 'arc',
+    centre: { x: side * (rootHalf + rootTangent), y: parameters.rootRadius },
+    radius: parameters.rootRadius,
+    startAngle: side < 0 ? -Math.PI / 2 : Math.PI - lean,
+    sweep: Math.PI / 2 + lean,
+  };
+}
+
+/** The rounded tip, left (−1) or right of the middle. */
+function tipArc(parameters: DovetailParameters, side: -1 | 1): ArcSegment {
+  const lean = toRadians(parameters.flankAngle);
+  const { tipHalf, tipTangent } = cornersOf(parameters);
+  return {
+    kind: 'arc',
+    centre: { x: side * (tipHalf - tipTangent), y: parameters.reach - parameters.tipRadius },
+    radius: parameters.tipRadius,
+    startAngle: side < 0 ? Math.PI + lean : Math.PI / 2,
+    sweep: -(Math.PI / 2 + lean),
+  };
+}
+
 function lineBetween(before: Segment, after: Segment): Segment[] {
   const [from, to] = [endOf(before), startOf(after)];
   return distance(from, to) <= POINT_TOLERANCE ? [] : [{ kind: 'line', from, to }];
+}
+
+/** What the refusals are worked out from. */
+interface Fit {
+  readonly parameters: DovetailParameters;
+  readonly corners: Corners;
+  readonly perRadius: number;
+  /** c/2; an outside radius under it becomes a sharp corner, which takes as much as a radius of c/2. */
+  readonly inset: Millimetres;
+  /** Half the edge between the tile's other two sides. */
+  readonly half: Millimetres;
 }
 
 /** Why a dovetail with this clearance does not fit an edge of this length; empty when it does. */
@@ -88,47 +115,80 @@ export function dovetailRefusals(
   edgeLength: Millimetres,
   clearance: Millimetres,
 ): Refusal[] {
-  const { rootWidth, reach, rootRadius, tipRadius } = parameters;
-  const lean = toRadians(parameters.flankAngle);
   const inset = clearance / 2;
-  const half = edgeLength / 2 - inset;
-  const { rootHalf, tipHalf, rootTangent, tipTangent } = cornersOf(parameters);
-  const refusals: Refusal[] = [];
-  const refuse = (
-    field: keyof DovetailParameters,
-    limit: Refusal['limit'],
-    value: number,
-    because: string,
-  ) => refusals.push({ field, limit, value, measure: 'length', because });
+  const fit: Fit = {
+    parameters,
+    corners: cornersOf(parameters),
+    perRadius: perRadius(parameters),
+    inset,
+    half: edgeLength / 2 - inset,
+  };
+  const refusals = [neckRefusal(fit), shoulderRefusal(fit), flankRefusal(fit), tipRefusal(fit)];
+  const found = refusals.filter((refusal) => refusal !== null);
+  const wide = found.length === 0 ? headRefusal(fit) : null;
+  return wide ? [wide] : found;
+}
 
-  const neckHalf = rootHalf + rootTangent - rootRadius;
-  if (neckHalf <= inset) {
-    refuse(
-      'rootWidth',
-      'least',
-      rootWidth + 2 * (inset - neckHalf),
-      'the clearance closes the neck',
-    );
+function neckRefusal({ parameters, corners, inset }: Fit): Refusal | null {
+  const neckHalf = corners.rootHalf + corners.rootTangent - parameters.rootRadius;
+  const short = inset + LEAST_WOOD / 2 - neckHalf;
+  if (short <= SLACK) return null;
+  const value = parameters.rootWidth + 2 * short;
+  return lengthRefusal('rootWidth', 'least', value, 'the clearance closes the neck');
+}
+
+function shoulderRefusal({ parameters, corners, perRadius, inset, half }: Fit): Refusal | null {
+  const foot = Math.max(parameters.rootRadius, inset);
+  if (corners.rootHalf + foot * perRadius <= half + SLACK) return null;
+  const because = 'the root fillet must end before the corner of the tile';
+  const widthMost = 2 * (half - foot * perRadius);
+  if (widthMost >= LEAST_ROOT_WIDTH) {
+    return lengthRefusal('rootWidth', 'most', widthMost, because);
   }
-  if (rootHalf + rootTangent > half) {
-    const value = 2 * (half - rootTangent);
-    const because = 'the root fillet must end before the corner of the tile';
-    if (value > 0) refuse('rootWidth', 'most', value, because);
-    else refuse('rootRadius', 'most', (half - rootHalf) / (rootTangent / rootRadius), because);
-  }
-  if (tipHalf >= half && refusals.length === 0) {
-    const value = toDegrees(Math.atan((half - rootHalf) / reach));
-    const because = 'the tips must stay within the tile';
-    refusals.push({ field: 'flankAngle', limit: 'most', value, measure: 'angle', because });
-  }
-  const flank = reach / Math.cos(lean);
-  if (rootTangent + tipTangent > flank) {
-    const value = (rootTangent + tipTangent) * Math.cos(lean);
-    refuse('reach', 'least', value, 'root fillet and rounded tip need that much flank');
-  }
-  if (tipTangent > tipHalf) {
-    const value = (tipHalf * tipRadius) / tipTangent;
-    refuse('tipRadius', 'most', value, 'the two rounded tips meet in the middle');
-  }
-  return refusals;
+  const radiusMost = (half - corners.rootHalf) / perRadius;
+  if (radiusMost >= inset) return lengthRefusal('rootRadius', 'most', radiusMost, because);
+  // no radius is small enough: the lips that the clearance sharpens take what the edge has
+  const narrowed = 2 * (half - inset * perRadius);
+  if (narrowed >= LEAST_ROOT_WIDTH) return lengthRefusal('rootWidth', 'most', narrowed, because);
+  const room = Math.max(half - corners.rootHalf, inset);
+  const steepest = 90 - 2 * toDegrees(Math.atan(inset / room));
+  return { field: 'flankAngle', limit: 'most', value: steepest, measure: 'angle', because };
+}
+
+/** Both radii share one flank; the clearance makes one of them larger by c/2 and the other smaller. */
+function flankRefusal({ parameters, perRadius, inset }: Fit): Refusal | null {
+  const { reach, rootRadius, tipRadius, flankAngle } = parameters;
+  const radii = Math.max(rootRadius + tipRadius, rootRadius + inset, tipRadius + inset);
+  const value = radii * perRadius * Math.cos(toRadians(flankAngle));
+  if (reach >= value - SLACK) return null;
+  const because = 'root fillet and rounded tip need that much flank';
+  return lengthRefusal('reach', 'least', value, because);
+}
+
+/** A tip sharpened by the clearance never meets the other: neck and flank leave it room. */
+function tipRefusal({ parameters, corners, perRadius }: Fit): Refusal | null {
+  const radiusMost = corners.tipHalf / perRadius;
+  if (parameters.tipRadius <= radiusMost + SLACK) return null;
+  return lengthRefusal('tipRadius', 'most', radiusMost, 'the two rounded tips meet in the middle');
+}
+
+/** The socket is wider than the head by c/2, and the tile's other sides stand back by c/2. */
+function headRefusal({ parameters, corners, inset, half }: Fit): Refusal | null {
+  const { rootWidth, flankAngle, tipRadius, reach } = parameters;
+  const over = corners.tipHalf - corners.tipTangent + tipRadius - (half - inset);
+  if (over <= SLACK) return null;
+  const because = 'the tips must stay within the tile';
+  const widthMost = rootWidth - 2 * over;
+  return widthMost >= LEAST_ROOT_WIDTH
+    ? lengthRefusal('rootWidth', 'most', widthMost, because)
+    : lengthRefusal('reach', 'most', reach - over / Math.tan(toRadians(flankAngle)), because);
+}
+
+function lengthRefusal(
+  field: keyof DovetailParameters,
+  limit: Refusal['limit'],
+  value: Millimetres,
+  because: string,
+): Refusal {
+  return { field, limit, value, measure: 'length', because };
 }

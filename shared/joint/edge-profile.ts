@@ -5,7 +5,7 @@ import { dovetailRefusals, dovetailShape } from './dovetail-profile';
 import type { JointParameters } from './parameters';
 import type { ProfileShape } from './profile-shape';
 import type { Refusal } from './refusal';
-import { roundRefusals, roundShape } from './round-profile';
+import { headHeight, roundRefusals, roundShape } from './round-profile';
 
 /** A tab's shape and the inside radii it leaves on both pieces. */
 export interface EdgeProfile extends ProfileShape {
@@ -42,6 +42,21 @@ export function closeProfile(
   return refusals.length > 0
     ? { ok: false, refusals }
     : { ok: true, profile: edgeProfile(parameters) };
+}
+
+/**
+ * The mouth: the opening of the socket at its narrowest, after clearance. Null for a wave, which only gets
+ * wider towards its opening. A foot radius under c/2 is a sharp lip after clearance, and the mouth lies
+ * between the two lips.
+ */
+export function mouthOf(parameters: JointParameters, clearance: Millimetres): Millimetres | null {
+  const profile = edgeProfile(parameters);
+  const inset = clearance / 2;
+  const foot = Math.max(profile.footRadius, inset);
+  if (parameters.profile === 'round' && headHeight(parameters) <= foot) return null;
+  if (profile.footRadius >= inset) return profile.neck + clearance;
+  const socket = clearedEdge(profile, 'socket', clearance);
+  return socket.to - socket.from;
 }
 
 /** One mating edge ready to cut: x along the edge, y outward, shoulders on y = −c/2. */

@@ -7,7 +7,7 @@ import type { ArcSegment } from '../geometry/segment';
 import type { Millimetres } from '../units/length';
 import type { RoundParameters } from './parameters';
 import type { ProfileShape } from './profile-shape';
-import type { Refusal } from './refusal';
+import { LEAST_WOOD, SLACK, type Refusal } from './refusal';
 
 /** Height of the head's centre over the edge line, mm. */
 export function headHeight(parameters: RoundParameters): Millimetres {
@@ -67,33 +67,47 @@ export function roundRefusals(
 ): Refusal[] {
   const { headRadius, filletRadius, reach } = parameters;
   const inset = clearance / 2;
-  const half = edgeLength / 2 - inset;
-  if (headRadius <= inset) {
-    return [least('headRadius', inset, 'the clearance takes half its width off the whole head')];
+  const headLeast = inset + LEAST_WOOD;
+  if (headRadius < headLeast - SLACK) {
+    return [
+      least('headRadius', headLeast, 'the clearance takes half its width off the whole head'),
+    ];
   }
-  if (headRadius >= half) {
-    return [most('headRadius', half, 'the head must stay within the tile')];
-  }
-  const height = headHeight(parameters);
-  if (height > filletRadius) {
-    const reachMost = greatestReach(headRadius, filletRadius, inset);
-    if (reach >= reachMost) {
-      return [most('reach', reachMost, 'beyond it the neck closes')];
+  if (!isWave(parameters)) {
+    // the socket is wider than the head by c/2, and the tile's other sides stand back by c/2
+    const headMost = edgeLength / 2 - clearance;
+    if (headRadius > headMost + SLACK) {
+      return [most('headRadius', headMost, 'the head must stay within the tile')];
     }
+    const reachMost = greatestReach(headRadius, filletRadius, inset);
+    if (reach > reachMost + SLACK) return [most('reach', reachMost, 'beyond it the neck closes')];
   }
-  const shoulder = Math.sqrt(filletCentreSquared(parameters));
-  if (shoulder <= half) return [];
-  // x_f ≤ half solved for the fillet radius: x_f² = r_h² − h² + 2 r_f · reach
-  const filletMost = (half ** 2 - headRadius ** 2 + height ** 2) / (2 * reach);
-  const because = 'the fillet must end before the corner of the tile';
-  return filletMost >= 0
-    ? [most('filletRadius', filletMost, because)]
-    : [most('headRadius', half, because)];
+  return shoulderRefusals(parameters, edgeLength / 2 - inset, inset);
 }
 
-/** The reach at which the neck, after clearance, is closed: x_f = r_f + c/2. */
+/**
+ * Where the shoulders are left less than nothing. With f = r_f the joint takes x² = reach · (2 r_h + 2 f −
+ * reach) on each side of the middle; a fillet under c/2 is a sharp lip of the socket, which lies where a
+ * fillet of c/2 would end, so f is at least c/2.
+ */
+function shoulderRefusals(
+  { headRadius, filletRadius, reach }: RoundParameters,
+  half: Millimetres,
+  inset: Millimetres,
+): Refusal[] {
+  const foot = Math.max(filletRadius, inset);
+  // x ≤ half solved for r_h + f
+  const bothMost = (half ** 2 / reach + reach) / 2;
+  if (headRadius + foot <= bothMost + SLACK) return [];
+  const because = 'the fillet must end before the corner of the tile';
+  const filletMost = bothMost - headRadius;
+  if (filletMost >= inset) return [most('filletRadius', filletMost, because)];
+  return [most('headRadius', bothMost - inset, because)];
+}
+
+/** The reach that leaves the least neck n after clearance: x_f = r_f + (c + n)/2. */
 function greatestReach(head: Millimetres, fillet: Millimetres, inset: Millimetres): Millimetres {
-  const centre = fillet + inset;
+  const centre = fillet + inset + LEAST_WOOD / 2;
   return head + fillet + Math.sqrt((head + fillet) ** 2 - centre ** 2);
 }
 

@@ -5,6 +5,7 @@
  */
 import type { Millimetres } from '../units/length';
 import type { RoundParameters, Scheme } from './parameters';
+import { LEAST_WOOD } from './refusal';
 import { roundShape } from './round-profile';
 
 export interface SmallestJointWish {
@@ -35,7 +36,8 @@ export interface SmallestJoint {
 export function smallestJoint(wish: SmallestJointWish): SmallestJoint {
   const insideLeast = (wish.cutterDiameter / 2) * (1 + wish.finishingMargin);
   const filletRadius = Math.max(0, insideLeast - wish.clearance / 2);
-  const neck = Math.max(2 * insideLeast - wish.clearance, 0);
+  // the mouth takes the cutter, and the clearance leaves some neck
+  const neck = Math.max(2 * insideLeast - wish.clearance, wish.clearance + LEAST_WOOD);
   const headRadius = neck / 2 + wish.undercut;
   const reach = reachFor(headRadius, filletRadius, neck);
   return {
@@ -79,16 +81,20 @@ function roundedUp(length: Millimetres): Millimetres {
   return Number((Math.ceil(length / STEP - 1e-6) * STEP).toFixed(2));
 }
 
-/** Least square tile: shoulders meet, the head stays inside, and the web between sockets holds. */
+/** Least square tile: shoulders meet, and the webs between the sockets and beside their heads hold. */
 function tileLeast(parameters: RoundParameters, wish: SmallestJointWish): Millimetres {
   const { headRadius, reach } = parameters;
   const { clearance, webMinimum } = wish;
-  const shoulders = 2 * roundShape(parameters).shoulder + clearance;
+  // a fillet under c/2 becomes a sharp lip where one of c/2 would end
+  const filletRadius = Math.max(parameters.filletRadius, clearance / 2);
+  const shoulders = 2 * roundShape({ ...parameters, filletRadius }).shoulder + clearance;
   const head = 2 * headRadius + clearance;
+  // the sides beside a socket stand back by c/2 each
+  const besideHead = head + clearance + 2 * webMinimum;
   const betweenOpposite = 2 * reach + clearance + webMinimum;
-  if (wish.scheme === 'alternating') return Math.max(shoulders, head, betweenOpposite);
+  if (wish.scheme === 'alternating') return Math.max(shoulders, besideHead, betweenOpposite);
   // one-way: the sockets lie on neighbouring sides; their heads' centres are √2 · (tile/2 − h) apart
   const height = reach - headRadius;
   const betweenNeighbours = 2 * height + Math.SQRT2 * (head + webMinimum);
-  return Math.max(shoulders, head, betweenNeighbours);
+  return Math.max(shoulders, besideHead, betweenNeighbours);
 }
