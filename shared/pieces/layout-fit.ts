@@ -30,27 +30,36 @@ export function layoutOutlines(layout: Layout): LayoutOutline[] {
   return [...found.values()].map((edges) => ({ edges, outline: tileOutline(layout, edges) }));
 }
 
-/** How a cutter fits the outline that is hardest to cut, and where on it. */
+/** How a cutter fits all outlines of a layout, and which of them is hardest to cut. */
 export interface LayoutFit extends CutterFit {
   /** The side of the tile with the tightest inside radius, and what that side carries. */
   readonly place: { readonly side: Side; readonly edge: 'tab' | 'socket' } | null;
+  /** The outline with the tightest inside radius. */
   readonly hardest: LayoutOutline;
 }
 
-/** The fit of the layout's own cutter over all its outlines: the tightest radius, the smallest largest cutter. */
+/**
+ * The fit of the layout's own cutter over all its outlines. The tightest radius, a crossing path and the
+ * smallest largest cutter may come from three different ones: a cutter must make them all.
+ */
 export function layoutFit(layout: Layout, outlines = layoutOutlines(layout)): LayoutFit {
   const fits = outlines.map((hardest) => {
     const fit = cutterFit(hardest.outline, layout.cutter.diameter);
     return { ...fit, hardest, place: placeOf(fit, hardest) };
   });
-  return fits.reduce((worst, fit) => (isHarder(fit, worst) ? fit : worst));
+  const tightest = fits.reduce((a, b) => (radiusOf(b) < radiusOf(a) - 1e-9 ? b : a));
+  const smallest = fits.reduce((a, b) => (b.largestCutter < a.largestCutter ? b : a));
+  return {
+    ...tightest,
+    fits: fits.every((fit) => fit.fits),
+    crossingAt: fits.find((fit) => fit.crossingAt)?.crossingAt ?? null,
+    largestCutter: smallest.largestCutter,
+    limitedBy: smallest.limitedBy,
+  };
 }
 
-function isHarder(fit: LayoutFit, than: LayoutFit): boolean {
-  if (fit.fits !== than.fits) return !fit.fits;
-  const [radius, known] = [fit.tightest?.radius ?? Infinity, than.tightest?.radius ?? Infinity];
-  if (Math.abs(radius - known) > 1e-9) return radius < known;
-  return fit.largestCutter < than.largestCutter;
+function radiusOf(fit: CutterFit): Millimetres {
+  return fit.tightest?.radius ?? Infinity;
 }
 
 function placeOf(fit: CutterFit, { edges, outline }: LayoutOutline): LayoutFit['place'] {
@@ -59,9 +68,11 @@ function placeOf(fit: CutterFit, { edges, outline }: LayoutOutline): LayoutFit['
   return { side, edge: edges[side] };
 }
 
-/** The least wood between two sockets of one tile, and between a socket and the tile's other sides. */
+/** The least wood around the sockets of one tile. */
 export interface Webs {
+  /** Between two sockets. */
   readonly betweenSockets: Gap | null;
+  /** Between a socket and a side of the tile that has none. */
   readonly besideSockets: Gap | null;
 }
 
@@ -70,14 +81,15 @@ export function layoutWebs(outlines: readonly LayoutOutline[]): Webs {
   const betweenSockets: Gap[] = [];
   const besideSockets: Gap[] = [];
   for (const { edges, outline } of outlines) {
-    const sockets = SIDES.filter((side) => edges[side] === 'socket');
-    for (const socket of sockets) {
-      const hollow = hollowOf(outline, socket);
+    for (const socket of SIDES.filter((side) => edges[side] === 'socket')) {
+      const hollow = withoutShoulders(segmentsOf(outline, socket));
       for (const other of SIDES.filter((side) => side !== socket)) {
         if (edges[other] === 'socket') {
-          betweenSockets.push(leastGap(hollow, hollowOf(outline, other)));
+          betweenSockets.push(leastGap(hollow, withoutShoulders(segmentsOf(outline, other))));
         } else {
-          besideSockets.push(leastGap(hollow, segmentsOf(outline, other)));
+          const wall =
+            other === ACROSS[socket] ? hollow : hollow.filter((segment) => !isLip(segment));
+          besideSockets.push(leastGap(wall, segmentsOf(outline, other)));
         }
       }
     }
@@ -87,6 +99,13 @@ export function layoutWebs(outlines: readonly LayoutOutline[]): Webs {
 
 const SIDES: readonly Side[] = ['left', 'right', 'bottom', 'top'];
 
+const ACROSS: Readonly<Record<Side, Side>> = {
+  left: 'right',
+  right: 'left',
+  bottom: 'top',
+  top: 'bottom',
+};
+
 function thinnest(gaps: readonly Gap[]): Gap | null {
   return gaps.reduce<Gap | null>((a, b) => (!a || b.distance < a.distance ? b : a), null);
 }
@@ -95,9 +114,16 @@ function segmentsOf(outline: TileOutline, side: Side): Segment[] {
   return outline.segments.filter((_, i) => outline.sides[i] === side);
 }
 
-/** A socket without its two shoulders. */
-function hollowOf(outline: TileOutline, side: Side): Segment[] {
-  const segments = segmentsOf(outline, side);
+/**
+ * The rounded lips of a socket end near the tile's corners by design; the wood that may be thin between a
+ * socket and its neighbouring sides lies beside the hollow behind them.
+ */
+function isLip(segment: Segment): boolean {
+  return segment.kind === 'arc' && segment.sweep > 0;
+}
+
+/** The shoulders are the lines along the tile's edge: those that end at its corners. */
+function withoutShoulders(segments: readonly Segment[]): Segment[] {
   const from = segments[0]?.kind === 'line' ? 1 : 0;
   const to = segments.at(-1)?.kind === 'line' ? -1 : undefined;
   return segments.slice(from, to);
