@@ -1,4 +1,4 @@
-import { edgeProfile, type EdgeProfile } from '../joint/edge-profile';
+import { edgeProfile, mouthOf, type EdgeProfile } from '../joint/edge-profile';
 import type { JointParameters } from '../joint/parameters';
 import type { Layout } from '../layout/schema';
 import {
@@ -19,6 +19,8 @@ export interface NamedJoint {
   readonly name: 'stave joint' | 'course joint';
   readonly parameters: JointParameters;
   readonly profile: EdgeProfile;
+  /** The socket's narrowest opening, or null for a wave. */
+  readonly mouth: Millimetres | null;
 }
 
 /** What the checks share, computed once. */
@@ -43,15 +45,15 @@ export type Check = (context: CheckContext) => CheckResult;
 /** Computes what the checks share. The layout must hold together (see `problemsOf`). */
 export function checkContext(layout: Layout, settings: CheckSettings): CheckContext {
   const unit = settings.lengthUnit ?? layout.lengthUnit;
-  const { staveJoint, courseJoint } = layout.joint;
+  const { staveJoint, courseJoint, clearance } = layout.joint;
   const outlines = layoutOutlines(layout);
   return {
     layout,
     finishingMargin: settings.finishingMargin ?? FINISHING_MARGIN,
     webMinimum: settings.webMinimum ?? WEB_MINIMUM_MM,
     joints: [
-      { name: 'stave joint', parameters: staveJoint, profile: edgeProfile(staveJoint) },
-      { name: 'course joint', parameters: courseJoint, profile: edgeProfile(courseJoint) },
+      namedJoint('stave joint', staveJoint, clearance),
+      namedJoint('course joint', courseJoint, clearance),
     ],
     outlines,
     fit: layoutFit(layout, outlines),
@@ -60,6 +62,15 @@ export function checkContext(layout: Layout, settings: CheckSettings): CheckCont
     length: (length) => formatLength(length, unit),
     cutter: (diameter) => formatCutter(diameter, unit),
   };
+}
+
+function namedJoint(
+  name: NamedJoint['name'],
+  parameters: JointParameters,
+  clearance: Millimetres,
+): NamedJoint {
+  const mouth = mouthOf(parameters, clearance);
+  return { name, parameters, profile: edgeProfile(parameters), mouth };
 }
 
 /** A cutter's size: millimetres with up to three decimals, since 1/8 in is 3.175 mm; inches with three. */

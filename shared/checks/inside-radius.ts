@@ -1,4 +1,5 @@
 import type { JointParameters } from '../joint/parameters';
+import type { Millimetres } from '../units/length';
 import type { CheckResult } from './check';
 import type { Check, CheckContext } from './context';
 
@@ -7,10 +8,9 @@ import type { Check, CheckContext } from './context';
  * an inside arc tighter than itself. Caution within the finishing margin, where the cutter dwells.
  */
 export const insideRadius: Check = (context) => {
-  const { fit, layout, finishingMargin, length, cutter } = context;
+  const { fit, layout } = context;
   const needed = layout.cutter.diameter / 2;
   const radius = fit.tightest?.radius ?? null;
-  const place = placeName(context);
   const base = {
     key: 'inside-radius',
     station: 'joint',
@@ -20,32 +20,37 @@ export const insideRadius: Check = (context) => {
     reason:
       'A round cutter leaves its own radius in every inside corner; in a tighter one it leaves wood, and the joint will not go together.',
   } as const satisfies Partial<CheckResult>;
-  if (radius === null) {
-    return { ...base, result: 'clear', finding: 'No piece has an inside corner.', remedy: '' };
-  }
-  const size = `The ${place.part} of the ${place.joint} is cut at ${length(radius)}`;
-  const need = `a ${cutter(layout.cutter.diameter)} cutter needs ${length(needed)}`;
+  return radius === null
+    ? { ...base, result: 'clear', finding: 'No piece has an inside corner.', remedy: '' }
+    : { ...base, ...held(context, radius, needed) };
+};
+
+/** The radius held against the cutter's. */
+function held(
+  context: CheckContext,
+  radius: Millimetres,
+  needed: Millimetres,
+): Pick<CheckResult, 'result' | 'finding' | 'remedy'> {
+  const { fit, layout, finishingMargin, length, cutter } = context;
+  const place = placeName(context);
+  // 1.585 and 1.5875 mm are both "1.59 mm": a third decimal tells them apart
+  const figure = radius !== needed && length(radius) === length(needed) ? cutter : length;
+  const size = `The ${place.part} of the ${place.joint} is cut at ${figure(radius)}`;
+  const need = `a ${cutter(layout.cutter.diameter)} cutter needs ${figure(needed)}`;
   if (radius < needed - 1e-6) {
     const smaller =
       fit.largestCutter >= 0.5 ? ` or take a ${cutter(fit.largestCutter)} cutter` : '';
-    return {
-      ...base,
-      result: 'stop',
-      finding: `${size}; ${need}.`,
-      remedy: `Widen the ${place.part}${smaller}.`,
-    };
+    const remedy = `Widen the ${place.part}${smaller}.`;
+    return { result: 'stop', finding: `${size}; ${need}.`, remedy };
   }
-  if (radius < needed * (1 + finishingMargin)) {
-    const wished = needed * (1 + finishingMargin);
-    return {
-      ...base,
-      result: 'caution',
-      finding: `${size}; ${need} and turns more freely from ${length(wished)}.`,
-      remedy: `Widen the ${place.part} a little, or take a smaller cutter.`,
-    };
+  const wished = needed * (1 + finishingMargin);
+  if (radius < wished) {
+    const finding = `${size}; ${need} and turns more freely from ${length(wished)}.`;
+    const remedy = `Widen the ${place.part} a little, or take a smaller cutter.`;
+    return { result: 'caution', finding, remedy };
   }
-  return { ...base, result: 'clear', finding: `${size}; ${need}.`, remedy: '' };
-};
+  return { result: 'clear', finding: `${size}; ${need}.`, remedy: '' };
+}
 
 interface PlaceName {
   readonly part: string;

@@ -5,47 +5,49 @@ import type { CheckResult } from './check';
 import type { Check, CheckContext } from './context';
 
 /** Whether the courses make the finished height, and what the trim lines cut. */
-export const trim: Check = (context) => {
+export const trim: Check = (context) => ({
+  key: 'trim',
+  station: 'shell',
+  title: 'Trim',
+  figure: { value: trimOf(context.layout.shell).eachEnd, kind: 'length' },
+  limit: { value: greatestTrim(context), kind: 'length' },
+  reason: 'What is trimmed off the ends must not open a joint or leave a sliver that breaks out.',
+  ...held(context),
+});
+
+/** The trim held against the end tiles. */
+function held(context: CheckContext): Pick<CheckResult, 'result' | 'finding' | 'remedy'> {
   const { layout, length } = context;
-  const { courses, finishedHeight, tileHeight } = layout.shell;
+  const { courses, finishedHeight } = layout.shell;
   const { untrimmedHeight, eachEnd } = trimOf(layout.shell);
-  const base = {
-    key: 'trim',
-    station: 'shell',
-    title: 'Trim',
-    figure: { value: eachEnd, kind: 'length' },
-    limit: { value: greatestTrim(context), kind: 'length' },
-    reason: 'What is trimmed off the ends must not open a joint or leave a sliver that breaks out.',
-  } as const satisfies Partial<CheckResult>;
   const made = `${courses} ${courses === 1 ? 'course makes' : 'courses make'} ${length(untrimmedHeight)}`;
   if (eachEnd < -1e-9) {
     return {
-      ...base,
       result: 'stop',
       finding: `${made}, less than the finished height of ${length(finishedHeight)}.`,
       remedy: `Add a course or taller tiles, or finish at ${length(untrimmedHeight)} or less.`,
     };
   }
   const trimmed = `${made}; ${length(Math.max(0, eachEnd))} is trimmed at each end`;
-  if (eachEnd > greatestTrim(context)) {
+  const most = greatestTrim(context);
+  if (eachEnd > most + 1e-9) {
+    const least = length(untrimmedHeight - 2 * Math.max(0, most));
     return {
-      ...base,
       result: 'stop',
       finding: `${trimmed}, past the course joint of the end tiles.`,
-      remedy: `Take a course less, or finish at ${length(untrimmedHeight - 2 * greatestTrim(context))} or more.`,
+      remedy: `Take a course less, or finish at ${least} or more.`,
     };
   }
-  const spoiled = eachEnd > 1e-9 ? spoiledBy(eachEnd, tileHeight, context) : null;
+  const spoiled = eachEnd > 1e-9 ? spoiledBy(eachEnd, context) : null;
   if (spoiled) {
     return {
-      ...base,
       result: 'caution',
       finding: `${trimmed}, which ${spoiled}.`,
       remedy: 'Change the finished height or the height of the tiles.',
     };
   }
-  return { ...base, result: 'clear', finding: `${trimmed}.`, remedy: '' };
-};
+  return { result: 'clear', finding: `${trimmed}.`, remedy: '' };
+}
 
 /** The most that can be trimmed before the line meets the end tile's course joint. */
 function greatestTrim({ layout }: CheckContext): Millimetres {
@@ -55,12 +57,9 @@ function greatestTrim({ layout }: CheckContext): Millimetres {
 }
 
 /** What a trim line spoils of the end tile's stave joint or of the web above it, or null. */
-function spoiledBy(
-  eachEnd: Millimetres,
-  tileHeight: Millimetres,
-  context: CheckContext,
-): string | null {
+function spoiledBy(eachEnd: Millimetres, context: CheckContext): string | null {
   const { layout, joints, webMinimum, length } = context;
+  const { tileHeight } = layout.shell;
   const head = (joints[0]?.profile.headWidth ?? 0) / 2 + layout.joint.clearance / 2;
   const [from, to] = [tileHeight / 2 - head, tileHeight / 2 + head];
   if (eachEnd > from && eachEnd < to) return 'cuts the stave joint of the end tiles';

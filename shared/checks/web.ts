@@ -18,13 +18,15 @@ export const web: Check = ({ webs, webMinimum, length }) => {
     const finding = 'No tile has two sockets that could meet.';
     return { ...base, result: 'clear', finding, remedy: '' };
   }
-  const place = thinnest === betweenSockets ? 'between two sockets' : 'beside a socket';
+  const between = thinnest === betweenSockets;
   const remedy = 'Shorten the reach, take a smaller head, or a larger tile.';
   if (thinnest.distance <= 0) {
-    const finding = 'Two sockets of a tile run into each other: the tile would fall apart.';
+    const finding = between
+      ? 'Two sockets of a tile run into each other: the tile would fall apart.'
+      : 'A socket runs into another side of its tile: the tile would fall apart.';
     return { ...base, result: 'stop', finding, remedy };
   }
-  const finding = `The thinnest wood ${place} is ${length(thinnest.distance)}`;
+  const finding = `The thinnest wood ${between ? 'between two sockets' : 'beside a socket'} is ${length(thinnest.distance)}`;
   if (thinnest.distance < webMinimum) {
     const short = `${finding}; ${length(webMinimum)} is the least.`;
     return { ...base, result: 'caution', finding: short, remedy };

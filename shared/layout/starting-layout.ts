@@ -1,5 +1,22 @@
 import type { Layout } from './schema';
 
+const WOODS: Layout['woods'] = [
+  {
+    key: 'maple',
+    name: 'Hard maple',
+    colour: '#E3CFA6',
+    species: 'Acer saccharum',
+    sawn: 'flat',
+  },
+  {
+    key: 'walnut',
+    name: 'Black walnut',
+    colour: '#5A3D2B',
+    species: 'Juglans nigra',
+    sawn: 'flat',
+  },
+];
+
 /** What a new commission starts from: a small shell that can be cut as it stands, all in one wood. */
 export function startingLayout(name: string): Layout {
   const shell: Layout['shell'] = {
@@ -25,22 +42,7 @@ export function startingLayout(name: string): Layout {
     },
     cutter: { diameter: 3.175, fluteLength: 16 },
     build: { way: 'stave-by-stave', turnOver: true, spareShare: 0.1, spareMinimum: 1 },
-    woods: [
-      {
-        key: 'maple',
-        name: 'Hard maple',
-        colour: '#E3CFA6',
-        species: 'Acer saccharum',
-        sawn: 'flat',
-      },
-      {
-        key: 'walnut',
-        name: 'Black walnut',
-        colour: '#5A3D2B',
-        species: 'Juglans nigra',
-        sawn: 'flat',
-      },
-    ],
+    woods: WOODS,
     cells: new Uint8Array(shell.staves * shell.courses),
   };
 }
