@@ -84,7 +84,10 @@ export class CommissionActions {
     try {
       await step();
     } catch (thrown) {
-      this.announcer.tell(`${onFailure} ${apiFailureOf(thrown).message}`);
+      const failure = apiFailureOf(thrown);
+      // The sign-in page says by itself that the session has ended.
+      if (failure.code === 'not-signed-in') return;
+      this.announcer.tell(`${onFailure} ${failure.message}`);
     }
   }
 }

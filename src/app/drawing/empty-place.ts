@@ -11,7 +11,11 @@ import { ShellMark } from './shell-mark';
   imports: [ShellMark],
   template: `
     <sl-shell-mark class="ring" tone="faint" />
-    <h2>{{ heading() }}</h2>
+    @if (level() === 1) {
+      <h1>{{ heading() }}</h1>
+    } @else {
+      <h2>{{ heading() }}</h2>
+    }
     <p>{{ text() }}</p>
     <div class="steps"><ng-content /></div>
   `,
@@ -27,6 +31,7 @@ import { ShellMark } from './shell-mark';
       width: 96px;
       height: 96px;
     }
+    h1,
     h2 {
       margin: 8px 0 0;
       font-size: 20px;
@@ -52,5 +57,7 @@ import { ShellMark } from './shell-mark';
 })
 export class EmptyPlace {
   readonly heading = input.required<string>();
+  /** 1 where this is the whole page. */
+  readonly level = input<1 | 2>(2);
   readonly text = input.required<string>();
 }

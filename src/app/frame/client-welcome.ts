@@ -8,6 +8,7 @@ import { SessionStore } from '../platform/session-store';
   imports: [EmptyPlace],
   template: `
     <sl-empty-place
+      [level]="1"
       [heading]="'Welcome, ' + (session.person()?.name ?? '')"
       [text]="
         (session.person()?.workshop?.name ?? 'The workshop') +

@@ -8,6 +8,7 @@ import { EmptyPlace } from '../drawing/empty-place';
   imports: [EmptyPlace, MatButton, RouterLink],
   template: `
     <sl-empty-place
+      [level]="1"
       heading="There is nothing at this address"
       text="It may have been moved, or it belongs to another workshop."
     >
