@@ -5,6 +5,7 @@ import type { Logger } from 'pino';
 import { mountSession } from './accounts/session-router';
 import { createPassport } from './accounts/sign-in';
 import { API_ROUTES } from './api-routes';
+import { mountBundles } from './bundles/bundles-router';
 import { mountCommissions } from './commissions/commissions-router';
 import type { Config } from './config';
 import { createCsrfGuard } from './http/csrf';
@@ -35,7 +36,7 @@ export function createApp(dependencies: AppDependencies): Express {
   app.use(requestLog(logger), securityHeaders(), compression());
   app.use('/api', api(dependencies));
   app.use(appStatics(config.appFolder));
-  app.use(answerError);
+  app.use(noSuchRoute, answerError);
   return app;
 }
 
@@ -63,6 +64,7 @@ function api({ config, open, logger }: AppDependencies): Router {
   mountCommissions(mount, open.database);
   mountLayouts(mount, open.database);
   mountVersions(mount, open.database);
+  mountBundles(mount, open.database);
   router.use(noSuchRoute);
   return router;
 }

@@ -24,7 +24,7 @@ const environmentSchema = z.object({
       error: 'must be one of fatal, error, warn, info, debug, trace, silent',
     })
     .default('info'),
-  APP_FOLDER: z.string().min(1, 'must not be empty').default('dist/app/browser'),
+  APP_FOLDER: z.string().min(1, 'must not be empty').default('dist/app'),
 });
 
 function wholeNumber(least: number, most: number) {

@@ -50,9 +50,10 @@ export async function beginSession(request: Request, person: Person): Promise<vo
   await settled((done) => request.logIn(person, done));
 }
 
-/** Ends the session, here and in the database. */
+/** Ends the session, here and in the database; passport begins an empty one, which goes as well. */
 export async function endSession(request: Request): Promise<void> {
   await settled((done) => request.logOut(done));
+  await settled((done) => request.session.destroy(done));
 }
 
 type Done<T> = (error: unknown, value?: T | false) => void;

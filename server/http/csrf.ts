@@ -54,7 +54,7 @@ export function createCsrfGuard(secret: string): CsrfGuard {
 
 /** Sessions that were never saved count as none: their id changes with every request. */
 function sessionIdOf(request: Request): string {
-  return request.isAuthenticated() ? request.sessionID : 'signed out';
+  return request.user ? request.sessionID : 'signed out';
 }
 
 function cookieOf(request: Request, name: string): string | undefined {

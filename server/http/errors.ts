@@ -100,14 +100,17 @@ function refusalOf(error: unknown): ApiError {
     );
   }
   return (
-    unreadableBody(error) ??
+    unreadableRequest(error) ??
     new ApiError('failed', 'Something went wrong on the server. It has been noted; try again.')
   );
 }
 
-/** What body-parser throws, in our words; null for any other error. */
-function unreadableBody(error: unknown): ApiError | null {
-  if (!(error instanceof Error) || !('type' in error) || !('status' in error)) return null;
+/** What Express and its body parser throw about a request, in our words; null for any other error. */
+function unreadableRequest(error: unknown): ApiError | null {
+  if (!(error instanceof Error) || !('status' in error)) return null;
+  if (!('type' in error)) {
+    return error.status === 400 ? new ApiError('bad-input', 'The address cannot be read.') : null;
+  }
   if (error.type === 'entity.too.large') {
     const limit = 'limit' in error ? Math.floor(Number(error.limit) / 1024) : 0;
     return new ApiError(

@@ -1,5 +1,4 @@
 import type { Database } from '@drizzle/database';
-import type { Person } from '@shared/api/session';
 import { layoutFileOf, printLayout } from '@shared/layout/read-layout';
 import { API_ROUTES } from '../api-routes';
 import { notFound } from '../http/errors';
@@ -7,7 +6,8 @@ import type { RouteMount } from '../http/route';
 import { layoutFileName } from '../layouts/file-name';
 import { isLayoutOf } from '../layouts/layouts-store';
 import { keepVersion, restoreVersion } from './keep-version';
-import { findVersion, listVersions } from './versions-store';
+import { versionNumbered } from './version-numbered';
+import { listVersions } from './versions-store';
 
 /** Keeping, listing, reading and restoring versions. */
 export function mountVersions(mount: RouteMount, database: Database): void {
@@ -36,16 +36,4 @@ export function mountVersions(mount: RouteMount, database: Database): void {
   mount(API_ROUTES.restoreVersion, ({ person, params, body }) =>
     restoreVersion(database, person, params.id, { number: params.number, note: body.note }),
   );
-}
-
-/** A version of one of the person's workshop's layouts; throws `not-found` otherwise. */
-export async function versionNumbered(
-  database: Database,
-  person: Person,
-  { id, number }: { readonly id: string; readonly number: number },
-) {
-  if (!(await isLayoutOf(database, person.workshop.id, id))) throw notFound('layout');
-  const found = await findVersion(database, id, number);
-  if (!found) throw notFound('version');
-  return found;
 }
