@@ -74,7 +74,7 @@ export class Browser {
     const bytes = response.body as Buffer;
     return {
       status: response.status,
-      headers: response.headers as Answer['headers'],
+      headers: response.headers,
       body: parsedBody(response.type, bytes),
       bytes,
     };
