@@ -12,7 +12,10 @@ const polylineSchema = z.object({
 
 /** The vertices of the one closed polyline on layer PART of what dxf-parser read. */
 export function dxfVertices(read: IDxf | null): DxfPoint[] {
-  const polylines = read?.entities.filter((entity) => entity.type.endsWith('POLYLINE')) ?? [];
+  const polylines =
+    read?.entities.filter(
+      (entity) => entity.type.endsWith('POLYLINE') && entity.layer === 'PART',
+    ) ?? [];
   if (polylines.length !== 1) throw new Error(`expected one polyline, found ${polylines.length}`);
   return polylineSchema
     .parse(polylines[0])

@@ -14,6 +14,7 @@ import { fromMillimetres, type LengthUnit } from '@shared/units/length';
 import { drawnArcs } from './drawn-arcs';
 import { dxfVertices } from './dxf-parser-reading';
 import { readWithEzdxf } from './dxf-readers';
+import { polylineArea } from './polyline-area';
 import { SAMPLE_OUTLINES } from './sample-outlines';
 
 const HOSTILE = '%%d =cmd() <script> "x" </title> ^J \\U+0041 é 🪵\n0\nEOF';
@@ -50,18 +51,6 @@ const samples = DXF_RELEASES.flatMap((release) =>
   ),
 );
 const readings = readWithEzdxf(samples.map((sample) => sample.path));
-
-/** Area inside a polyline with bulges: the chords' and each arc's circular segment. */
-function areaWithin(points: readonly (readonly [number, number, number])[]): number {
-  return points.reduce((sum, [x, y, bulge], index) => {
-    const [x2, y2] = points[(index + 1) % points.length] ?? [x, y];
-    const chord = (x * y2 - x2 * y) / 2;
-    if (bulge === 0) return sum + chord;
-    const angle = 4 * Math.atan(bulge);
-    const radius = Math.hypot(x2 - x, y2 - y) / 2 / Math.sin(angle / 2);
-    return sum + chord + (radius ** 2 * (angle - Math.sin(angle))) / 2;
-  }, 0);
-}
 
 describe.each(samples.map((sample, index) => ({ ...sample, reading: readings[index] })))(
   '$release in $unit, $name, read by ezdxf',
@@ -101,7 +90,7 @@ describe.each(samples.map((sample, index) => ({ ...sample, reading: readings[ind
     });
 
     it('encloses the area of the model', () => {
-      const area = areaWithin(reading?.polylines[0]?.points ?? []);
+      const area = polylineArea(reading?.polylines[0]?.points ?? []);
       const scale = fromMillimetres(1, unit) ** 2;
       expect(area).toBeCloseTo(areaOf(outline) * scale, 6);
     });
@@ -132,7 +121,7 @@ describe.each(samples)(
       expect(Object.keys(read?.tables.layer.layers ?? {})).toEqual(
         expect.arrayContaining(['PART', 'CENTRE_PATH', 'LABEL', 'BOARD']),
       );
-      const area = areaWithin(dxfVertices(read));
+      const area = polylineArea(dxfVertices(read));
       expect(area).toBeCloseTo(areaOf(outline) * fromMillimetres(1, unit) ** 2, 6);
     });
   },
