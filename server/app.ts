@@ -42,9 +42,12 @@ export function createApp(dependencies: AppDependencies): Express {
 
 function api({ config, open, logger }: AppDependencies): Router {
   const router = express.Router();
+  router.use((_request, response, next) => {
+    response.set('Cache-Control', 'no-store');
+    next();
+  });
   router.get('/health', async (_request, response) => {
     const health = await healthOf(open.database);
-    response.set('Cache-Control', 'no-store');
     response.status(health.status === 'ok' ? 200 : 503).json(health);
   });
   const document = openApiDocument(API_ROUTES);

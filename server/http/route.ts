@@ -154,7 +154,6 @@ function paramsOf(route: RouteDeclaration, request: Request): { id?: string; num
 }
 
 function sendAnswer(route: RouteDeclaration, response: Response, answer: unknown): void {
-  response.set('Cache-Control', 'no-store');
   if (route.answer.status === 204) {
     response.status(204).end();
   } else if ('file' in route.answer) {

@@ -23,6 +23,9 @@ export function securityHeaders() {
         frameAncestors: ["'none'"],
       },
     },
+    xFrameOptions: { action: 'deny' },
+    // the workshop's other addresses may still be plain HTTP: speak only for this one
+    strictTransportSecurity: { includeSubDomains: false },
     referrerPolicy: { policy: 'same-origin' },
   });
 }

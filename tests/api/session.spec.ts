@@ -1,4 +1,4 @@
-import { people } from '@drizzle/schema/index';
+import { people, rateLimits } from '@drizzle/schema/index';
 import { sessionSchema } from '@shared/api/session';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { Browser, EMAILS, signedIn } from './browser';
@@ -193,6 +193,16 @@ describe('guessing passwords', () => {
     expect(problem(stopped, 429).code).toBe('too-many-requests');
     expect(Number(stopped.headers['retry-after'])).toBeGreaterThan(0);
     await other.close();
+  });
+
+  it('counts anew when the time is over, and forgets counts that are', async () => {
+    const { database } = running.open;
+    const browser = await fresh({ 'X-Forwarded-For': '198.51.100.10' });
+    for (let i = 0; i < 10; i++) await browser.post('/session', guess);
+    expect((await browser.post('/session', guess)).status).toBe(429);
+    await database.update(rateLimits).set({ resetsAt: new Date(Date.now() - 1000) });
+    expect((await browser.post('/session', guess)).status).toBe(401);
+    expect(await database.$count(rateLimits)).toBe(2);
   });
 
   it('does not shut out the same person somewhere else', async () => {
