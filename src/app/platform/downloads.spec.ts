@@ -14,6 +14,12 @@ describe('the name of a downloaded file', () => {
     );
   });
 
+  it('a plain word needs no quotes', () => {
+    expect(fileNameIn('attachment; filename=rehearsal-floor-drum.json')).toBe(
+      'rehearsal-floor-drum.json',
+    );
+  });
+
   it('no header, or one without a name, gives none', () => {
     expect(fileNameIn(null)).toBeNull();
     expect(fileNameIn('attachment')).toBeNull();

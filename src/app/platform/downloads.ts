@@ -42,5 +42,6 @@ export function fileNameIn(disposition: string | null): string | null {
       // A broken encoding leaves the plain name.
     }
   }
-  return /filename="((?:[^"\\]|\\.)*)"/i.exec(disposition)?.[1]?.replace(/\\(.)/g, '$1') ?? null;
+  const quoted = /filename="((?:[^"\\]|\\.)*)"/i.exec(disposition)?.[1];
+  return quoted?.replace(/\\(.)/g, '$1') ?? /filename=([^\s;"]+)/i.exec(disposition)?.[1] ?? null;
 }
