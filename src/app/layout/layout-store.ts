@@ -280,9 +280,11 @@ export class LayoutStore implements OnDestroy {
     this.draft.set(withSave(this.openDraft(), crypto.randomUUID()));
     const save = this.openDraft().inFlight;
     if (!save) return { kind: 'done' };
-    const send = way === 'leaving' ? this.api.saveLeaving : this.api.save;
+    const edit = wireEdit(save);
     try {
-      this.accept(save, await send.call(this.api, opened.id, wireEdit(save)));
+      const sending =
+        way === 'leaving' ? this.api.saveLeaving(opened.id, edit) : this.api.save(opened.id, edit);
+      this.accept(save, await sending);
       return { kind: 'done' };
     } catch (thrown) {
       return this.digest(save, apiFailureOf(thrown));

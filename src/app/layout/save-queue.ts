@@ -88,10 +88,16 @@ export class SaveQueue {
     while (this.savable.unsaved()) {
       this.current.set({ kind: 'saving' });
       const attempt = await this.savable.attempt();
-      if (attempt.kind === 'failed') return this.fail(attempt.sentence);
+      if (attempt.kind === 'failed') {
+        this.fail(attempt.sentence);
+        return;
+      }
       this.failures = 0;
       const calm = attempt.kind === 'done' && !this.hurried;
-      if (calm && this.savable.unsaved()) return this.wait();
+      if (calm && this.savable.unsaved()) {
+        this.wait();
+        return;
+      }
     }
     this.current.set({ kind: 'saved' });
   }

@@ -33,9 +33,10 @@ export class SceneBook {
       last !== null && last.layout.shell === layout.shell && last.layout.joint === layout.joint;
     const sameLook =
       last !== null && last.layout.woods === layout.woods && last.numbers === numbers;
-    const drawing: SheetDrawing =
-      sameSheet && last ? last.scene.drawing : sheetDrawing(layout.shell, layout.joint);
-    const woods = sameLook && last ? last.scene.woods : this.paints.of(layout.woods);
+    const drawing: SheetDrawing = sameSheet
+      ? last.scene.drawing
+      : sheetDrawing(layout.shell, layout.joint);
+    const woods = sameLook ? last.scene.woods : this.paints.of(layout.woods);
     const scene = { drawing, cells: layout.cells, woods, numbers };
     this.last = { layout, numbers, scene };
     return { scene, change: sameSheet && sameLook ? 'cells' : 'all' };
