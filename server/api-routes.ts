@@ -8,6 +8,7 @@ import {
   newCommissionSchema,
 } from '@shared/api/commission';
 import { editSavedSchema, editSchema, openLayoutSchema } from '@shared/api/layout';
+import { liveQuerySchema, whereaboutsSchema } from '@shared/api/live';
 import { sessionSchema, signInSchema } from '@shared/api/session';
 import {
   keepVersionSchema,
@@ -108,6 +109,24 @@ export const API_ROUTES = {
     summary: 'The draft as a layout file',
     access: SEE,
     answer: LAYOUT_FILE,
+    refusals: [],
+  },
+  watchLayout: {
+    method: 'get',
+    path: '/layouts/:id/events',
+    summary: "The layout's edits as they are saved, and who is here (Last-Event-ID resumes)",
+    access: SEE,
+    query: liveQuerySchema,
+    answer: { status: 200, stream: 'text/event-stream' },
+    refusals: [],
+  },
+  tellWhereabouts: {
+    method: 'post',
+    path: '/layouts/:id/here',
+    summary: 'Say where one is in a layout',
+    access: SEE,
+    body: whereaboutsSchema,
+    answer: { status: 204 },
     refusals: [],
   },
   listVersions: {

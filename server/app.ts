@@ -10,6 +10,8 @@ import { mountCommissions } from './commissions/commissions-router';
 import type { Config } from './config';
 import { createCsrfGuard } from './http/csrf';
 import { answerError, noSuchRoute } from './http/errors';
+import { mountEvents } from './events/events-router';
+import type { LiveLayouts } from './events/live-layouts';
 import { healthOf } from './http/health-store';
 import { openApiDocument } from './http/openapi';
 import { signInLimits } from './http/rate-limit';
@@ -25,6 +27,7 @@ export interface AppDependencies {
   readonly config: Config;
   readonly open: OpenDatabase;
   readonly logger: Logger;
+  readonly live: LiveLayouts;
 }
 
 /** The whole server as one request handler; it listens nowhere yet. */
@@ -40,7 +43,7 @@ export function createApp(dependencies: AppDependencies): Express {
   return app;
 }
 
-function api({ config, open, logger }: AppDependencies): Router {
+function api({ config, open, logger, live }: AppDependencies): Router {
   const router = express.Router();
   router.use((_request, response, next) => {
     response.set('Cache-Control', 'no-store');
@@ -66,6 +69,7 @@ function api({ config, open, logger }: AppDependencies): Router {
   mountSession(mount, passport, signInLimits(open.database));
   mountCommissions(mount, open.database);
   mountLayouts(mount, open.database);
+  mountEvents(mount, { database: open.database, live, logger });
   mountVersions(mount, open.database);
   mountBundles(mount, open.database);
   router.use(noSuchRoute);

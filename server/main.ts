@@ -3,6 +3,7 @@ import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { openDatabase } from '@drizzle/database';
 import { createApp } from './app';
+import { LiveLayouts } from './events/live-layouts';
 import { readConfig, type Config } from './config';
 import { createLogger } from './http/request-log';
 
@@ -15,7 +16,8 @@ function start(config: Config): void {
     connections: config.databaseConnections,
     onConnectionLost: (error) => logger.warn({ err: error }, 'a database connection was lost'),
   });
-  const server = createServer(createApp({ config, open, logger }));
+  const live = new LiveLayouts(open, config.databaseUrl, logger);
+  const server = createServer(createApp({ config, open, logger, live }));
 
   server.on('error', (error) => {
     console.error(`The server cannot listen on ${config.host}:${config.port}: ${error.message}.`);
@@ -35,6 +37,7 @@ function start(config: Config): void {
     server.close(() => {
       void open.close().finally(() => process.exit(0));
     });
+    void live.close();
     server.closeIdleConnections();
     setTimeout(() => server.closeAllConnections(), LAST_REQUESTS_MS).unref();
   };

@@ -4,3 +4,4 @@ export * from './sessions';
 export * from './commissions';
 export * from './layouts';
 export * from './versions';
+export * from './presence';

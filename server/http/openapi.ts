@@ -94,6 +94,10 @@ function answerOf(answer: RouteAnswer): Json {
     const content = { [answer.file]: { schema: { type: 'string', format: 'binary' } } };
     return { 200: { description: 'The file', content } };
   }
+  if ('stream' in answer) {
+    const content = { [answer.stream]: { schema: { type: 'string' } } };
+    return { 200: { description: 'Events until either side ends', content } };
+  }
   const content = jsonContent(jsonSchema(answer.schema, 'output'));
   return { [answer.status]: { description: answer.status === 201 ? 'Made' : 'Done', content } };
 }

@@ -19,6 +19,7 @@ export type Access = 'anyone' | { readonly anyOf: readonly Right[] };
 export type RouteAnswer =
   | { readonly status: 200 | 201; readonly schema: z.ZodType }
   | { readonly status: 200; readonly file: 'application/json' | 'application/zip' }
+  | { readonly status: 200; readonly stream: 'text/event-stream' }
   | { readonly status: 204 };
 
 export interface RouteDeclaration {
@@ -45,6 +46,11 @@ export interface FileAnswer {
   readonly content: string | Uint8Array;
 }
 
+/** What goes on answering after the handler has returned. */
+export interface StreamAnswer {
+  readonly open: (response: Response) => void;
+}
+
 type ParamsOf<Path extends string> = (Path extends `${string}/:id${string}`
   ? { readonly id: string }
   : unknown) &
@@ -66,7 +72,9 @@ type AnswerOf<R extends RouteDeclaration> = R['answer'] extends {
   ? z.input<S>
   : R['answer'] extends { file: string }
     ? FileAnswer
-    : undefined;
+    : R['answer'] extends { stream: string }
+      ? StreamAnswer
+      : undefined;
 
 export type RouteHandler<R extends RouteDeclaration> = (
   call: RouteCall<R>,
@@ -156,6 +164,8 @@ function paramsOf(route: RouteDeclaration, request: Request): { id?: string; num
 function sendAnswer(route: RouteDeclaration, response: Response, answer: unknown): void {
   if (route.answer.status === 204) {
     response.status(204).end();
+  } else if ('stream' in route.answer) {
+    (answer as StreamAnswer).open(response);
   } else if ('file' in route.answer) {
     const { fileName, content } = answer as FileAnswer;
     response.attachment(fileName).type(route.answer.file);

@@ -89,6 +89,7 @@ export async function editsBetween(
       revision: layoutEdits.revision,
       patch: layoutEdits.patch,
       by: { id: people.id, name: people.name },
+      idempotencyKey: layoutEdits.idempotencyKey,
     })
     .from(layoutEdits)
     .innerJoin(people, eq(people.id, layoutEdits.authorId))

@@ -97,6 +97,8 @@ export const recordedEditSchema = z.object({
   revision: z.number().int(),
   patch: patchSchema,
   by: z.object({ id: z.uuid(), name: z.string() }),
+  /** By which its author's browser knows it again. */
+  idempotencyKey: z.uuid(),
 });
 export type RecordedEdit = z.infer<typeof recordedEditSchema>;
 

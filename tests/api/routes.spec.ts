@@ -11,8 +11,11 @@ import { runningApp, type RunningApp } from './running-app';
 
 type RouteName = keyof typeof API_ROUTES;
 
+/** Open to anyone; and the stream, which answers without end: events.spec.ts tries its doors. */
+type Elsewhere = 'whoIsSignedIn' | 'signIn' | 'signOut' | 'watchLayout';
+
 /** Who may call what, written out once more: the table of the README, not the one the server reads. */
-const MAY: Record<Exclude<RouteName, 'whoIsSignedIn' | 'signIn' | 'signOut'>, Role[]> = {
+const MAY: Record<Exclude<RouteName, Elsewhere>, Role[]> = {
   listCommissions: ['owner', 'designer', 'maker'],
   createCommission: ['owner', 'designer'],
   readCommission: ['owner', 'designer', 'maker'],
@@ -20,6 +23,7 @@ const MAY: Record<Exclude<RouteName, 'whoIsSignedIn' | 'signIn' | 'signOut'>, Ro
   openLayout: ['owner', 'designer', 'maker'],
   editLayout: ['owner', 'designer', 'maker'],
   downloadLayout: ['owner', 'designer', 'maker'],
+  tellWhereabouts: ['owner', 'designer', 'maker'],
   listVersions: ['owner', 'designer', 'maker'],
   keepVersion: ['owner', 'designer', 'maker'],
   readVersion: ['owner', 'designer', 'maker'],
@@ -68,13 +72,14 @@ function bodyFor(name: RouteName): object | undefined {
     createCommission: { title: 'Matrix' },
     changeCommission: { client: 'Harbour Trust' },
     editLayout: { ...editOf(0, laid(0)), baseRevision: 1_000_000 },
+    tellWhereabouts: { connection: randomUUID(), station: 'shell', tile: null },
     keepVersion: { revision: 1_000_000 },
   };
   return bodies[name] ?? {};
 }
 
 /** Past the door: the request was judged by the handler, whatever it said. */
-const ADMITTED = [200, 201, 400, 409];
+const ADMITTED = [200, 201, 204, 400, 409];
 
 describe.each(PROTECTED)('%s', (name) => {
   const route: RouteDeclaration = API_ROUTES[name];

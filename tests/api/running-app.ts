@@ -2,6 +2,7 @@
 import { openDatabase, type OpenDatabase } from '@drizzle/database';
 import { seedDatabase } from '@seeds/seed';
 import { createApp } from '@server/app';
+import { LiveLayouts } from '@server/events/live-layouts';
 import { readConfig, type Config } from '@server/config';
 import type { Express } from 'express';
 import { pino } from 'pino';
@@ -32,8 +33,18 @@ export async function runningApp(): Promise<RunningApp> {
 export function appOn(databaseUrl: string): RunningApp {
   const config = testConfig(databaseUrl);
   const open = openDatabase(databaseUrl, { connections: 5, onConnectionLost: () => undefined });
-  const app = createApp({ config, open, logger: pino({ level: 'silent' }) });
-  return { app, open, databaseUrl, close: open.close };
+  const logger = pino({ level: 'silent' });
+  const live = new LiveLayouts(open, databaseUrl, logger);
+  const app = createApp({ config, open, logger, live });
+  return {
+    app,
+    open,
+    databaseUrl,
+    close: async () => {
+      await live.close();
+      await open.close();
+    },
+  };
 }
 
 function testConfig(databaseUrl: string): Config {

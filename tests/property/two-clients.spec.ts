@@ -60,7 +60,12 @@ class SimulatedServer {
 
 function recorded(edit: { patch: Patch; by: string }, revision: number): RecordedEdit {
   const id = '00000000-0000-4000-8000-000000000000';
-  return { revision, patch: wirePatchOf(edit.patch), by: { id, name: edit.by } };
+  return {
+    revision,
+    patch: wirePatchOf(edit.patch),
+    by: { id, name: edit.by },
+    idempotencyKey: id,
+  };
 }
 
 class Client {
