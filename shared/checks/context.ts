@@ -10,8 +10,8 @@ import {
   type Webs,
 } from '../pieces/layout-fit';
 import { ringOf, type Ring } from '../shell/ring';
-import { formatLength } from '../units/format';
-import { fromMillimetres, type LengthUnit, type Millimetres } from '../units/length';
+import { formatCutterFigure, formatLength } from '../units/format';
+import type { LengthUnit, Millimetres } from '../units/length';
 import { FINISHING_MARGIN, WEB_MINIMUM_MM, type CheckResult, type CheckSettings } from './check';
 
 /** One joint of the layout with its name in sentences. */
@@ -73,8 +73,7 @@ function namedJoint(
   return { name, parameters, profile: edgeProfile(parameters), mouth };
 }
 
-/** A cutter's size: millimetres with up to three decimals, since 1/8 in is 3.175 mm; inches with three. */
+/** A cutter's size with its unit: "3.175 mm". */
 export function formatCutter(diameter: Millimetres, unit: LengthUnit): string {
-  const figure = fromMillimetres(diameter, unit).toFixed(3);
-  return `${unit === 'mm' ? figure.replace(/0$/, '') : figure} ${unit}`;
+  return `${formatCutterFigure(diameter, unit)} ${unit}`;
 }

@@ -17,6 +17,12 @@ export function formatLength(length: Millimetres, unit: LengthUnit): string {
   return `${formatLengthFigure(length, unit)} ${unit}`;
 }
 
+/** A cutter's size: up to a third decimal in millimetres, since 1/8 in is 3.175 mm; inches with three. */
+export function formatCutterFigure(diameter: Millimetres, unit: LengthUnit): string {
+  const figure = fromMillimetres(diameter, unit).toFixed(3);
+  return unit === 'mm' ? figure.replace(/0$/, '') : figure;
+}
+
 /** The angle with its sign, e.g. "5.63°". */
 export function formatAngle(angle: Degrees): string {
   return `${withoutNegativeZero(angle.toFixed(2))}°`;

@@ -23,6 +23,7 @@ import { LengthInput } from './length-input';
         matInput
         slLength
         [lengthUnit]="lengthUnit()"
+        [fineness]="fineness()"
         [formControl]="control"
         [errorStateMatcher]="atOnce"
       />
@@ -56,6 +57,7 @@ export class LengthField {
   readonly hint = input('');
   /** What the figure measures, shown after the unit, such as "⌀". */
   readonly measure = input('');
+  readonly fineness = input<'length' | 'cutter'>('length');
   readonly problem = input<string | null>(null);
   readonly access = input<'open' | 'locked'>('open');
   readonly changed = output<Millimetres>();

@@ -6,7 +6,7 @@ import {
   type ValidationErrors,
   type Validator,
 } from '@angular/forms';
-import { formatLengthFigure } from '@shared/units/format';
+import { formatCutterFigure, formatLengthFigure } from '@shared/units/format';
 import type { LengthUnit, Millimetres } from '@shared/units/length';
 import { parseLength } from './parse-length';
 
@@ -34,6 +34,8 @@ import { parseLength } from './parse-length';
 export class LengthInput implements ControlValueAccessor, Validator {
   /** The unit the reader wants to see. */
   readonly lengthUnit = input.required<LengthUnit>();
+  /** How fine the figure is shown: cutters have a third decimal where they need it. */
+  readonly fineness = input<'length' | 'cutter'>('length');
 
   private readonly element = inject<ElementRef<HTMLInputElement>>(ElementRef).nativeElement;
   /** The exact value behind the text. */
@@ -83,6 +85,7 @@ export class LengthInput implements ControlValueAccessor, Validator {
 
   private show(unit: LengthUnit): void {
     if (this.sentence !== null) return;
-    this.element.value = this.held === null ? '' : formatLengthFigure(this.held, unit);
+    const figure = this.fineness() === 'cutter' ? formatCutterFigure : formatLengthFigure;
+    this.element.value = this.held === null ? '' : figure(this.held, unit);
   }
 }

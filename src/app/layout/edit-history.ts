@@ -4,7 +4,7 @@
  * positions would name other tiles.
  */
 import { computed, signal } from '@angular/core';
-import type { Patch } from '@shared/layout/patch';
+import { fieldsOf, squashPatches, type Patch } from '@shared/layout/patch';
 
 /** One thing done, as it is named in "Undo …". */
 export interface Step {
@@ -12,15 +12,27 @@ export interface Step {
   readonly patch: Patch;
 }
 
+/** Typing in one field goes on as one step while its pauses are shorter than this, ms. */
+const TYPING_PAUSE = 2_000;
+
 export class EditHistory {
+  private lastNoted = -Infinity;
   private readonly done = signal<readonly Step[]>([]);
   private readonly undone = signal<readonly Step[]>([]);
 
   readonly undoLabel = computed(() => this.done().at(-1)?.label ?? null);
   readonly redoLabel = computed(() => this.undone().at(-1)?.label ?? null);
 
-  /** Notes a step; what was undone before it can no longer be redone. */
-  note(step: Step): void {
+  /** Notes a step, done at `now` (ms); what was undone before it can no longer be redone. */
+  note(step: Step, now: number): void {
+    const last = this.done().at(-1);
+    const typing = now - this.lastNoted < TYPING_PAUSE && this.undone().length === 0;
+    this.lastNoted = now;
+    if (last && typing && setsSameFields(last, step)) {
+      const patch = squashPatches(last.patch, step.patch);
+      this.done.update((steps) => [...steps.slice(0, -1), { label: step.label, patch }]);
+      return;
+    }
     this.done.update((steps) => [...steps, step]);
     this.undone.set([]);
   }
@@ -39,6 +51,13 @@ export class EditHistory {
     this.done.set([]);
     this.undone.set([]);
   }
+}
+
+/** True when both steps do nothing but set the same fields under the same name. */
+function setsSameFields(a: Step, b: Step): boolean {
+  const fields = fieldsOf(a.patch);
+  const fieldsOnly = [...a.patch, ...b.patch].every((change) => change.kind === 'field');
+  return a.label === b.label && fieldsOnly && fields.join() === fieldsOf(b.patch).join();
 }
 
 type Steps = ReturnType<typeof signal<readonly Step[]>>;

@@ -2,17 +2,28 @@
  * The open layout. Screens read it as signals and change it with gestures; it undoes, saves and merges by
  * itself. Provided on the layout's route: it lives as long as the layout is open.
  */
-import { computed, inject, Injectable, signal, type OnDestroy, type Signal } from '@angular/core';
+import {
+  computed,
+  inject,
+  Injectable,
+  linkedSignal,
+  signal,
+  type OnDestroy,
+  type Signal,
+} from '@angular/core';
 import { conflictSchema, type Edit, type EditSaved, type OpenLayout } from '@shared/api/layout';
 import type { VersionKept } from '@shared/api/version';
 import { wirePatchOf } from '@shared/api/wire-patch';
-import { decodeCells, type Grid } from '@shared/layout/cells';
+import { runChecks } from '@shared/checks/run-checks';
+import type { Grid } from '@shared/layout/cells';
+import { problemsOf } from '@shared/layout/consistency';
 import { invertPatch, patchBetween, resizes, type Change, type Patch } from '@shared/layout/patch';
+import { readLayout } from '@shared/layout/read-layout';
 import { restatePatch, type Contest } from '@shared/layout/rebase';
 import type { Layout, Wood } from '@shared/layout/schema';
 import type { LengthUnit } from '@shared/units/length';
 import { Subject, type Observable } from 'rxjs';
-import { apiFailureOf, type ApiFailure } from '../platform/api-problem';
+import { ApiFailure, apiFailureOf } from '../platform/api-problem';
 import { SessionStore } from '../platform/session-store';
 import {
   isSaved,
@@ -91,6 +102,16 @@ export class LayoutStore implements OnDestroy {
     { equal: (a, b) => a.staves === b.staves && a.courses === b.courses },
   );
   readonly lengthUnit: Signal<LengthUnit> = computed(() => this.layout().lengthUnit);
+  /**
+   * The document for drawings and checks: it changes only when something besides the pattern does, and
+   * stays at the last one that holds together while two people's edits together do not.
+   */
+  readonly soundLayout: Signal<Layout> = linkedSignal<Layout, Layout>({
+    source: computed(() => this.layout(), { equal: sameBesidesPattern }),
+    computation: (layout, previous) =>
+      previous && problemsOf(layout).length > 0 ? previous.value : layout,
+  });
+  readonly checks = computed(() => runChecks(this.soundLayout()));
   /** The revision the server has. */
   readonly revision = computed(() => this.openDraft().revision);
   readonly saving: Signal<SaveState> = this.queue.state;
@@ -209,10 +230,10 @@ export class LayoutStore implements OnDestroy {
   }
 
   private show(open: OpenLayout): void {
-    const { layout: file, revision, id, commission, lastVersion } = open;
-    const cells = decodeCells(file.cells) ?? new Uint8Array();
-    const { format: _format, formatVersion: _formatVersion, ...document } = file;
-    this.draft.set(openDraft({ ...document, cells }, revision));
+    const { revision, id, commission, lastVersion } = open;
+    const reading = readLayout(open.layout);
+    if (!reading.ok) throw new ApiFailure(200, 'failed', UNREADABLE);
+    this.draft.set(openDraft(reading.layout, revision));
     this.openedLayout.set({ id, commission, lastVersion });
     this.history.forget();
     this.overlaid.set(new Set());
@@ -231,7 +252,7 @@ export class LayoutStore implements OnDestroy {
     this.underHand.set(false);
     this.draft.set(draft);
     if (patch.length === 0) return;
-    this.history.note({ label, patch });
+    this.history.note({ label, patch }, Date.now());
     this.touched(patch);
   }
 
@@ -326,6 +347,19 @@ export class LayoutStore implements OnDestroy {
     const patch = patchBetween(before, met.draft.local);
     if (patch.length > 0) this.appliedSubject.next({ patch, origin: 'theirs' });
   }
+}
+
+const UNREADABLE =
+  'The server sent a layout that this page cannot read. Load the page again; if it stays, tell whoever runs it.';
+
+function sameBesidesPattern(a: Layout, b: Layout): boolean {
+  return (
+    a.shell === b.shell &&
+    a.joint === b.joint &&
+    a.cutter === b.cutter &&
+    a.build === b.build &&
+    a.lengthUnit === b.lengthUnit
+  );
 }
 
 /** Answers that will not change by asking again: the edit has to go. */

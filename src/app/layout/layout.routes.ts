@@ -1,3 +1,26 @@
-import type { Routes } from '@angular/router';
+import type { CanDeactivateFn, Routes } from '@angular/router';
+import type { LayoutPage } from './layout-page';
 
-export const LAYOUT_ROUTES: Routes = [];
+const mayLeave: CanDeactivateFn<LayoutPage> = (page) => page.mayLeave();
+
+/** One lazy route a station; stations.ts lists the same in the order of the work. */
+export const LAYOUT_ROUTES: Routes = [
+  {
+    path: '',
+    loadComponent: () => import('./layout-page').then((module) => module.LayoutPage),
+    canDeactivate: [mayLeave],
+    children: [
+      { path: '', pathMatch: 'full', redirectTo: 'shell' },
+      {
+        path: 'shell',
+        title: 'Shell',
+        loadComponent: () => import('./shell/shell-station').then((module) => module.ShellStation),
+      },
+      {
+        path: 'joint',
+        title: 'Joint',
+        loadComponent: () => import('./joint/joint-station').then((module) => module.JointStation),
+      },
+    ],
+  },
+];

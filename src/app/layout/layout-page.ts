@@ -1,0 +1,139 @@
+import { Component, computed, effect, inject, input, untracked } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { MatDialog } from '@angular/material/dialog';
+import { RouterOutlet } from '@angular/router';
+import { fieldChange } from '@shared/layout/patch';
+import type { Contest } from '@shared/layout/rebase';
+import { resizeChange } from '@shared/layout/resize';
+import { firstValueFrom } from 'rxjs';
+import { Trouble } from '../drawing/trouble';
+import { Announcer } from '../platform/announcer';
+import { BarActions } from '../platform/bar-actions';
+import { BarSlot } from '../platform/bar-slot';
+import { ContestDialog, type ContestAnswer, type ContestQuestion } from './contest-dialog';
+import { KeepVersionDialog } from './keep-version-dialog';
+import { LayoutStore } from './layout-store';
+import { LayoutTools } from './layout-tools';
+import { LeaveDialog } from './leave-dialog';
+import { SavePill } from './save-pill';
+import { SaveTrouble } from './save-trouble';
+import { StationsBar } from './stations-bar';
+
+/** The open layout: its bar, its stations, and everything about saving that a person must see. */
+@Component({
+  selector: 'sl-layout-page',
+  imports: [
+    BarActions,
+    LayoutTools,
+    MatButton,
+    RouterOutlet,
+    SavePill,
+    SaveTrouble,
+    StationsBar,
+    Trouble,
+  ],
+  providers: [LayoutStore],
+  templateUrl: './layout-page.html',
+  styleUrl: './layout-page.scss',
+  host: {
+    '(document:keydown)': 'press($event)',
+    '(window:online)': 'store.retry()',
+    '(window:beforeunload)': 'warn($event)',
+    '(window:pagehide)': 'store.saveLeaving()',
+  },
+})
+export class LayoutPage {
+  protected readonly store = inject(LayoutStore);
+  private readonly dialogs = inject(MatDialog);
+  private readonly announcer = inject(Announcer);
+  private readonly slot = inject(BarSlot);
+  private asking = false;
+
+  readonly commissionId = input.required<string>();
+  protected readonly base = computed(() => `/commissions/${this.commissionId()}/layout`);
+  protected readonly failure = computed(() => {
+    const state = this.store.openState();
+    return state.kind === 'failed' ? state.failure : null;
+  });
+  protected readonly keepAs = computed(() => (this.store.opened()?.lastVersion?.number ?? 0) + 1);
+
+  constructor() {
+    effect(() => {
+      const id = this.commissionId();
+      untracked(() => void this.store.open(id));
+    });
+    effect((onCleanup) => {
+      this.slot.crumb.set(this.store.opened()?.commission.title ?? null);
+      onCleanup(() => this.slot.crumb.set(null));
+    });
+    effect(() => {
+      const contest = this.store.contests()[0];
+      if (contest) untracked(() => void this.ask(contest));
+    });
+  }
+
+  /** Before the page is left: everything saved, or the person says that it may be lost. */
+  async mayLeave(): Promise<boolean> {
+    if (!this.store.unsaved()) return true;
+    await this.store.flush();
+    if (!this.store.unsaved()) return true;
+    const asked = this.dialogs.open<LeaveDialog, undefined, boolean>(LeaveDialog);
+    return (await firstValueFrom(asked.afterClosed())) === true;
+  }
+
+  protected keep(): void {
+    const dialog = this.dialogs.open<KeepVersionDialog, LayoutStore, number>(KeepVersionDialog, {
+      data: this.store,
+      width: '520px',
+    });
+    dialog.afterClosed().subscribe((number) => {
+      if (number !== undefined) this.announcer.tell(`Version ${number} is kept.`);
+    });
+  }
+
+  protected warn(event: BeforeUnloadEvent): void {
+    if (this.store.unsaved() || this.store.contests().length > 0) event.preventDefault();
+  }
+
+  /** Ctrl Z and Ctrl Shift Z (or Ctrl Y), except where a text field has its own. */
+  protected press(event: KeyboardEvent): void {
+    if (!(event.ctrlKey || event.metaKey) || event.altKey || isTyping(event.target)) return;
+    const key = event.key.toLowerCase();
+    if (key !== 'z' && key !== 'y') return;
+    event.preventDefault();
+    if (key === 'y' || event.shiftKey) this.store.redo();
+    else this.store.undo();
+  }
+
+  private async ask(contest: Contest): Promise<void> {
+    if (this.asking) return;
+    this.asking = true;
+    const data: ContestQuestion = { contest, lengthUnit: this.store.lengthUnit() };
+    const options = { data, disableClose: true };
+    const asked = this.dialogs.open<ContestDialog, ContestQuestion, ContestAnswer>(
+      ContestDialog,
+      options,
+    );
+    const answer = await firstValueFrom(asked.afterClosed());
+    this.asking = false;
+    if (answer === 'mine') this.keepMine(contest);
+    this.store.settleContest(contest);
+  }
+
+  private keepMine(contest: Contest): void {
+    const layout = this.store.layout();
+    if (contest.kind === 'grid') {
+      this.store.edit('Resize the shell', resizeChange(layout, contest.mine));
+    } else {
+      const { path, after } = contest.mine;
+      this.store.edit('Keep my value', fieldChange(layout, path, after));
+    }
+  }
+}
+
+function isTyping(target: EventTarget | null): boolean {
+  if (target instanceof HTMLTextAreaElement) return true;
+  return (
+    target instanceof HTMLInputElement && !['radio', 'checkbox', 'range'].includes(target.type)
+  );
+}
