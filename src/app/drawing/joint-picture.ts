@@ -204,7 +204,7 @@ function filletCutterMarks({ frame, layout, unit }: Drawing): Mark[] {
       kind: 'text',
       at: upright
         ? { x: centre.x - radius - 10, y: centre.y }
-        : { x: centre.x, y: centre.y + radius + 16 },
+        : { x: centre.x, y: centre.y - radius - 16 },
       text: narrow || !upright ? short : long,
       anchor: upright ? 'end' : 'middle',
       look: fits ? 'teal' : 'stop',

@@ -44,6 +44,7 @@ import { LengthInput } from './length-input';
       padding-left: 6px;
       color: var(--mute);
       font-weight: 600;
+      white-space: nowrap;
     }
   `,
 })

@@ -1,5 +1,5 @@
 /** The ring from above: every stave with its own wood, the turned circles, and a joint under the lens. */
-import { cellAt } from '@shared/layout/cells';
+import { cellAt, courseLetters } from '@shared/layout/cells';
 import type { Layout } from '@shared/layout/schema';
 import { ringOf, type Ring } from '@shared/shell/ring';
 import { toRadians } from '@shared/units/angle';
@@ -30,7 +30,7 @@ export function ringPicture(layout: Layout, unit: LengthUnit, size: PixelSize): 
   };
   return {
     title: titleOf(layout, ring, unit),
-    caption: 'From above, with a joint through a course of tabs under the lens',
+    caption: `From above at course ${courseLetters(courseShown(layout))}; a tab of the stave joint under the lens`,
     marks: [
       ...staveMarks(layout, ring, place.view),
       ...turnedMarks(layout, place.view),
@@ -78,10 +78,16 @@ export function staveCorners(layout: Layout, ring: Ring, stave: number): PointMm
   return [corner(ring.apothem, -1), corner(ring.apothem, 1), corner(inner, 1), corner(inner, -1)];
 }
 
+/** The course whose woods the ring is drawn in: halfway up. */
+function courseShown({ shell }: Layout): number {
+  return Math.floor(shell.courses / 2);
+}
+
 function staveMarks(layout: Layout, ring: Ring, view: View): Mark[] {
-  const { staves, courses } = layout.shell;
+  const { staves } = layout.shell;
+  const course = courseShown(layout);
   return Array.from({ length: staves }, (_, stave) => {
-    const wood = layout.woods[layout.cells[cellAt(layout.shell, stave, courses - 1)] ?? 0];
+    const wood = layout.woods[layout.cells[cellAt(layout.shell, stave, course)] ?? 0];
     return {
       kind: 'path',
       segments: polygon(staveCorners(layout, ring, stave)),

@@ -68,6 +68,9 @@ import { openLayoutText } from './open-layout-text';
       flex: none;
       align-items: center;
     }
+    sl-icon {
+      margin-right: 6px;
+    }
     @media (max-width: 899px) {
       .wide {
         display: none;
