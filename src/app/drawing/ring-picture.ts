@@ -23,10 +23,10 @@ export function ringPicture(layout: Layout, unit: LengthUnit, size: PixelSize): 
   const place = placeOf(ring, size);
   const lens = {
     centre: {
-      x: place.view.origin.x + place.radius * 0.9,
-      y: place.view.origin.y + place.radius * 0.78,
+      x: place.view.origin.x + place.radius * 1.06,
+      y: place.view.origin.y + place.radius * 0.66,
     },
-    radius: place.radius * 0.46,
+    radius: place.radius * 0.56,
   };
   return {
     title: titleOf(layout, ring, unit),
@@ -49,10 +49,10 @@ interface Place {
 }
 
 function placeOf(ring: Ring, { width, height }: PixelSize): Place {
-  const radius = Math.max(20, Math.min((width - 40) / 2.36, (height - 44) / 2.28));
+  const radius = Math.max(20, Math.min((width - 40) / 2.62, (height - 44) / 2.28));
   const view = {
     pixelsPerMm: radius / (ring.acrossCorners / 2),
-    origin: { x: width / 2 - radius * 0.16, y: 14 + radius },
+    origin: { x: width / 2 - radius * 0.31, y: 14 + radius },
   };
   return { view, radius };
 }

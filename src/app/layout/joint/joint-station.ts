@@ -23,7 +23,7 @@ import { otherProfile } from './other-profile';
 import { SmallestJointDialog, type SmallestJointQuestion } from './smallest-joint-dialog';
 
 const TARGETS: readonly Choice<JointTarget>[] = [
-  { value: 'both', label: 'Both alike' },
+  { value: 'both', label: 'Both' },
   { value: 'staveJoint', label: 'Stave' },
   { value: 'courseJoint', label: 'Course' },
 ];
