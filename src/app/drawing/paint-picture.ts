@@ -18,7 +18,8 @@ export function paintPicture(svg: Svg, picture: Picture, size: PixelSize): void 
 function paintMark(onto: Container, mark: Mark): void {
   switch (mark.kind) {
     case 'path':
-      return paintPath(onto, mark);
+      paintPath(onto, mark);
+      return;
     case 'circle': {
       const { centre, radius, look } = mark;
       onto
@@ -31,7 +32,8 @@ function paintMark(onto: Container, mark: Mark): void {
       onto.line(mark.from.x, mark.from.y, mark.to.x, mark.to.y).addClass(mark.look);
       return;
     case 'text':
-      return paintText(onto, mark);
+      paintText(onto, mark);
+      return;
     case 'lens': {
       const { centre, radius } = mark;
       const opening = onto.circle(2 * radius).center(centre.x, centre.y);

@@ -5,6 +5,9 @@ import type { Edit, EditSaved, OpenLayout } from '@shared/api/layout';
 import type { KeepVersion, VersionKept } from '@shared/api/version';
 import { firstValueFrom } from 'rxjs';
 
+/** Whether the page stays while it saves. */
+export type SaveWay = 'staying' | 'leaving';
+
 /** The requests of an open layout. All reject with an ApiFailure. */
 @Injectable({ providedIn: 'root' })
 export class LayoutApi {
@@ -18,16 +21,10 @@ export class LayoutApi {
     return firstValueFrom(this.http.get<OpenLayout>(`/api/layouts/${commission.layoutId}`));
   }
 
-  save(layoutId: string, edit: Edit): Promise<EditSaved> {
-    return firstValueFrom(this.http.patch<EditSaved>(`/api/layouts/${layoutId}`, edit));
-  }
-
-  /** Like `save`, but the browser finishes sending it after the page is gone (bodies up to 64 kB). */
-  saveLeaving(layoutId: string, edit: Edit): Promise<EditSaved> {
-    const request = this.http.patch<EditSaved>(`/api/layouts/${layoutId}`, edit, {
-      keepalive: true,
-    });
-    return firstValueFrom(request);
+  /** "leaving": the browser finishes sending it after the page is gone (bodies up to 64 kB). */
+  save(layoutId: string, edit: Edit, way: SaveWay): Promise<EditSaved> {
+    const options = { keepalive: way === 'leaving' };
+    return firstValueFrom(this.http.patch<EditSaved>(`/api/layouts/${layoutId}`, edit, options));
   }
 
   keepVersion(layoutId: string, version: KeepVersion): Promise<VersionKept> {

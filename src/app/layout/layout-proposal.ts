@@ -39,11 +39,6 @@ export class LayoutProposal {
     this.drawn = computed(() => (this.problems().length === 0 ? this.candidate() : sound()));
   }
 
-  /** The value a field shows: what is being typed, or the document's. */
-  value<P extends FieldPath>(path: P, inDocument: LayoutFields[P]): LayoutFields[P] {
-    return (this.wishes()[path] as LayoutFields[P] | undefined) ?? inDocument;
-  }
-
   /** Fields were typed in: an edit as soon as the whole holds together. */
   wish(wished: Wishes, label: string): void {
     this.wishes.update((wishes) => ({ ...wishes, ...wished }));
@@ -96,8 +91,8 @@ function withCells(layout: Layout, cells: Uint8Array): Layout {
   return cells.length === layout.cells.length ? { ...layout, cells } : layout;
 }
 
-function changeOf<P extends FieldPath>(layout: Layout, path: P, wishes: Wishes): Change | null {
-  const value = wishes[path] as LayoutFields[P] | undefined;
+function changeOf(layout: Layout, path: FieldPath, wishes: Wishes): Change | null {
+  const value = wishes[path];
   return value === undefined ? null : fieldChange(layout, path, value);
 }
 

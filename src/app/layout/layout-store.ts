@@ -42,7 +42,7 @@ import {
   type Save,
 } from './draft';
 import { EditHistory } from './edit-history';
-import { LayoutApi } from './layout-api';
+import { LayoutApi, type SaveWay } from './layout-api';
 import { SaveQueue, type Attempt, type SaveState } from './save-queue';
 
 export interface OpenedLayout {
@@ -295,17 +295,14 @@ export class LayoutStore implements OnDestroy {
     );
   }
 
-  private async attemptSave(way: 'staying' | 'leaving' = 'staying'): Promise<Attempt> {
+  private async attemptSave(way: SaveWay = 'staying'): Promise<Attempt> {
     const opened = this.openedLayout();
     if (!opened) return { kind: 'done' };
     this.draft.set(withSave(this.openDraft(), crypto.randomUUID()));
     const save = this.openDraft().inFlight;
     if (!save) return { kind: 'done' };
-    const edit = wireEdit(save);
     try {
-      const sending =
-        way === 'leaving' ? this.api.saveLeaving(opened.id, edit) : this.api.save(opened.id, edit);
-      this.accept(save, await sending);
+      this.accept(save, await this.api.save(opened.id, wireEdit(save), way));
       return { kind: 'done' };
     } catch (thrown) {
       return this.digest(save, apiFailureOf(thrown));
