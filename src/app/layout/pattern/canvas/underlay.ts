@@ -39,12 +39,11 @@ export class Underlay {
     while (this.images.length < turns.length) this.addImage();
     for (const image of this.images.splice(turns.length)) image.destroy();
     turns.forEach((turn, i) => {
-      this.images[i]?.setAttrs({
-        x: (turn * circumference - view.leftMm) * view.pxPerMm,
-        y: (view.topMm - height) * view.pxPerMm,
-        width: circumference * view.pxPerMm,
-        height: height * view.pxPerMm,
-      });
+      this.images[i]
+        ?.x((turn * circumference - view.leftMm) * view.pxPerMm)
+        .y((view.topMm - height) * view.pxPerMm)
+        .width(circumference * view.pxPerMm)
+        .height(height * view.pxPerMm);
     });
   }
 
