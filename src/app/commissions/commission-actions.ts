@@ -1,4 +1,4 @@
-import { inject, Injectable } from '@angular/core';
+import { afterNextRender, DOCUMENT, inject, Injectable, Injector } from '@angular/core';
 import { MatDialog } from '@angular/material/dialog';
 import type { Commission, CommissionChanges, Stage } from '@shared/api/commission';
 import { Announcer } from '../platform/announcer';
@@ -14,6 +14,8 @@ export class CommissionActions {
   private readonly announcer = inject(Announcer);
   private readonly downloads = inject(Downloads);
   private readonly dialog = inject(MatDialog);
+  private readonly document = inject(DOCUMENT);
+  private readonly injector = inject(Injector);
 
   async edit(commission: Commission): Promise<void> {
     const { EditCommissionDialog } = await import('./edit-commission-dialog');
@@ -70,7 +72,15 @@ export class CommissionActions {
     await this.saying('Nothing was changed.', async () => {
       await this.store.change(commission.id, changes);
       this.announcer.offer(sentence, 'Undo', () => void this.undo(commission, back));
+      afterNextRender(() => this.keepFocus(), { injector: this.injector });
     });
+  }
+
+  /** The row may be gone, and the button that was pressed with it: the keyboard goes on from the page. */
+  private keepFocus(): void {
+    if (this.document.activeElement === this.document.body) {
+      this.document.querySelector('main')?.focus({ preventScroll: true });
+    }
   }
 
   private async undo(commission: Commission, back: CommissionChanges): Promise<void> {

@@ -13,6 +13,7 @@ class NoShell {}
 describe('signing in', () => {
   let fixture: ComponentFixture<SignIn>;
   const signIn = vi.fn();
+  const load = vi.fn();
   const page = () => fixture.nativeElement as HTMLElement;
   const field = (type: string) => page().querySelector<HTMLInputElement>(`input[type=${type}]`)!;
 
@@ -30,10 +31,11 @@ describe('signing in', () => {
 
   beforeEach(async () => {
     signIn.mockReset().mockResolvedValue(null);
+    load.mockReset().mockResolvedValue(null);
     TestBed.configureTestingModule({
       providers: [
         provideRouter([{ path: '**', children: [] }]),
-        { provide: SessionStore, useValue: { signIn, person: signal(null) } },
+        { provide: SessionStore, useValue: { signIn, load, person: signal(null) } },
       ],
     });
     TestBed.overrideComponent(SignIn, {
@@ -54,6 +56,18 @@ describe('signing in', () => {
     fixture.componentRef.setInput('next', '//elsewhere.example/trap');
     await submit('ines@quarrylane.example', 'ring-of-staves');
     expect(TestBed.inject(Router).url).toBe('/');
+  });
+
+  it('says at once when the server is away, and lets through who is signed in when it is back', async () => {
+    load.mockRejectedValueOnce(new ApiFailure(0, 'unavailable', 'Away.'));
+    fixture = TestBed.createComponent(SignIn);
+    fixture.componentRef.setInput('next', '/commissions');
+    await fixture.whenStable();
+    expect(page().querySelector('[role=alert]')?.textContent).toContain('does not answer');
+    load.mockResolvedValueOnce({ name: 'Ines Marlow' });
+    page().querySelector<HTMLButtonElement>('[role=alert] button')!.click();
+    await fixture.whenStable();
+    expect(TestBed.inject(Router).url).toBe('/commissions');
   });
 
   it('says what is missing before it asks the server', async () => {

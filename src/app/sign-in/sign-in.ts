@@ -50,10 +50,26 @@ export class SignIn {
   protected readonly waiting = signal(false);
   protected readonly passwordShown = signal(false);
   private readonly failure = signal<ApiFailure | null>(null);
+  protected readonly serverAway = computed(() => this.failure()?.code === 'unavailable');
   protected readonly sentence = computed(() => {
     const failure = this.failure();
     return failure === null ? null : sentenceFor(failure);
   });
+
+  constructor() {
+    void this.lookForSession();
+  }
+
+  /** Someone who came here only because the server was away is let through once it is back. */
+  protected async lookForSession(): Promise<void> {
+    this.failure.set(null);
+    try {
+      const person = await this.session.load();
+      if (person !== null) await this.router.navigateByUrl(addressWithin(this.next()));
+    } catch (thrown) {
+      this.failure.set(apiFailureOf(thrown));
+    }
+  }
 
   protected async submit(): Promise<void> {
     if (this.waiting()) return;
