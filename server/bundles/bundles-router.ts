@@ -33,7 +33,7 @@ export function mountBundles(mount: RouteMount, database: Database): void {
       overrideReason: overridden ? override?.reason : null,
     });
     return {
-      fileName: layoutFileName(layout.name, `-version-${version.number}.zip`),
+      fileName: layoutFileName(layout.name, `-v${version.number}.zip`),
       content: bundleZip(built.bundle),
     };
   });

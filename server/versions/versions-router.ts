@@ -28,7 +28,7 @@ export function mountVersions(mount: RouteMount, database: Database): void {
   mount(API_ROUTES.downloadVersion, async ({ person, params }) => {
     const { layout } = await versionNumbered(database, person, params);
     return {
-      fileName: layoutFileName(layout.name, `-version-${params.number}.json`),
+      fileName: layoutFileName(layout.name, `-v${params.number}.json`),
       content: printLayout(layout),
     };
   });

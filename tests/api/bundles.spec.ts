@@ -39,7 +39,7 @@ describe('the bundle of a version', () => {
     const answer = await maker.post(`${lantern}/3/bundle`, { dxf: 'r12', unit: 'in' });
     expect(answer.status).toBe(200);
     expect(answer.headers['content-type']).toBe('application/zip');
-    expect(answer.headers['content-disposition']).toContain('ferry-hall-lantern-version-3.zip');
+    expect(answer.headers['content-disposition']).toContain('ferry-hall-lantern-v3.zip');
     expect(manifestIn(answer.bytes)).toMatchObject({ unit: 'in', version: { number: 3 } });
     expect(await lastExport()).toMatchObject({
       versionNumber: 3,

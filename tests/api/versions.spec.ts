@@ -104,7 +104,7 @@ describe('reading versions', () => {
   it('saves one as a layout file', async () => {
     const lantern = await commissionTitled(maker, 'Ferry-hall lantern');
     const answer = await maker.get(`/layouts/${lantern.layoutId}/versions/1/file`);
-    expect(answer.headers['content-disposition']).toContain('ferry-hall-lantern-version-1.json');
+    expect(answer.headers['content-disposition']).toContain('ferry-hall-lantern-v1.json');
     const reading = readLayoutText(Buffer.from(answer.bytes).toString());
     expect(reading).toMatchObject({ ok: true, layout: { cutter: { fluteLength: 12.7 } } });
   });
