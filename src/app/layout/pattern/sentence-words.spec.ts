@@ -3,7 +3,7 @@ import { inSentence, stepWords, tilesWords, timesWords } from './sentence-words'
 
 describe('the words of the sentence', () => {
   it('count in plain English', () => {
-    expect([timesWords(1), timesWords(8)]).toEqual(['once', '8 times round']);
+    expect([timesWords(1), timesWords(8)]).toEqual(['not repeated', '8 times round']);
     expect([stepWords(0), stepWords(1), stepWords(-2)]).toEqual([
       'on the same course',
       '1 course up',

@@ -18,9 +18,9 @@ export const MIRROR_WORDS: Record<Mirror, string> = {
 /** Courses from one repeat to the next that are offered. */
 export const STEPS = [-4, -3, -2, -1, 0, 1, 2, 3, 4] as const;
 
-/** "once", "8 times round". */
+/** "not repeated", "8 times round". */
 export function timesWords(times: number): string {
-  return times === 1 ? 'once' : `${times} times round`;
+  return times === 1 ? 'not repeated' : `${times} times round`;
 }
 
 /** "on the same course", "1 course up", "2 courses down". */

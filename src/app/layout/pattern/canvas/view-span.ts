@@ -7,7 +7,7 @@ export interface ViewSpan {
   /** Staves from the seam to the left border and the width in view; the first may be below 0. */
   readonly from: number;
   readonly width: number;
-  /** Numbers, from 1, of the first and the last stave more than half in view. */
+  /** Numbers, from 1, of the first and the last stave wholly in view. */
   readonly first: number;
   readonly last: number;
   readonly whole: boolean;
@@ -24,8 +24,8 @@ export function viewSpan(
   return {
     from,
     width: Math.min(width, grid.staves),
-    first: roundStave(grid, Math.round(from)) + 1,
-    last: roundStave(grid, Math.round(from + width) - 1) + 1,
+    first: roundStave(grid, Math.ceil(from - 0.02)) + 1,
+    last: roundStave(grid, Math.floor(from + width + 0.02) - 1) + 1,
     whole: width >= grid.staves,
   };
 }

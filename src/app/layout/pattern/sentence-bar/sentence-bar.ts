@@ -34,7 +34,7 @@ import { WordChoice, type WordOption } from './word-choice';
         [value]="tool.extent()"
         (valueChange)="tool.extent.set($event)"
       />
-      <span>, repeated</span>
+      <span class="goes-on">{{ tool.times() > 1 ? ', repeated' : ',' }}</span>
       <sl-word-choice
         about="Repeated"
         [options]="times()"
@@ -42,7 +42,7 @@ import { WordChoice, type WordOption } from './word-choice';
         (valueChange)="tool.repeat($event)"
       />
       @if (tool.times() > 1) {
-        <span>, each step</span>
+        <span class="goes-on">, each step</span>
         <sl-word-choice
           about="Each step"
           [options]="steps"
@@ -50,7 +50,7 @@ import { WordChoice, type WordOption } from './word-choice';
           (valueChange)="tool.step.set($event)"
         />
       }
-      <span>,</span>
+      <span class="goes-on">,</span>
       <sl-word-choice
         about="Mirrored"
         [options]="mirrors"

@@ -4,17 +4,11 @@ import type { WoodFigure } from '../grain/wood-figure';
 
 /** Shows so many texture pixels a CSS pixel, as the tiles do when they are large. */
 const TEXTURE_SCALE = 0.62;
-const DRAWN = { width: 440, height: 150 };
 
 /** A piece of a wood with its grain and the marks of its figure, as they show on the tiles. */
 @Component({
   selector: 'sl-wood-strip',
-  template: `<canvas
-    #strip
-    [width]="drawn.width"
-    [height]="drawn.height"
-    aria-hidden="true"
-  ></canvas>`,
+  template: `<canvas #strip width="440" height="150" aria-hidden="true"></canvas>`,
   styles: `
     :host {
       display: block;
@@ -31,7 +25,6 @@ const DRAWN = { width: 440, height: 150 };
 export class WoodStrip {
   readonly colour = input.required<string>();
   readonly figure = input.required<WoodFigure>();
-  protected readonly drawn = DRAWN;
   private readonly strip = viewChild.required<ElementRef<HTMLCanvasElement>>('strip');
 
   constructor() {

@@ -1,0 +1,81 @@
+import { Component, computed, effect, inject, input, output, signal } from '@angular/core';
+import { runChecks } from '@shared/checks/run-checks';
+import { cellAt } from '@shared/layout/cells';
+import type { Layout } from '@shared/layout/schema';
+import { FigureText } from '../../../drawing/figure-text';
+import { LayoutStore } from '../../layout-store';
+import type { ViewSpan } from '../canvas/view-span';
+import { CheckList } from './check-list';
+import { RingView } from './ring-view';
+import { toCutSentence } from './to-cut';
+
+/** How long the hand must rest before pieces are counted anew. */
+const COUNT_REST_MS = 300;
+
+/** Beside the canvas: where one is on the shell, what stands in the way of cutting, and how much there is to cut. */
+@Component({
+  selector: 'sl-pattern-side',
+  imports: [CheckList, FigureText, RingView],
+  template: `
+    <section>
+      <h2>Where you are on the shell</h2>
+      @if (span(); as span) {
+        <sl-ring-view
+          [staves]="store.grid().staves"
+          [colours]="topCourse()"
+          [span]="span"
+          (turned)="turned.emit($event)"
+        />
+      }
+    </section>
+    <section>
+      <h2>To cut</h2>
+      <p><sl-figure-text [text]="toCut()" /></p>
+    </section>
+    <section>
+      <h2>Before it can be cut</h2>
+      <sl-check-list [checks]="checks()" />
+    </section>
+  `,
+  styleUrl: './pattern-side.scss',
+})
+export class PatternSide {
+  protected readonly store = inject(LayoutStore);
+  readonly span = input.required<ViewSpan | null>();
+  readonly turned = output<number>();
+
+  protected readonly topCourse = computed(() => {
+    const grid = this.store.grid();
+    const cells = this.store.cells();
+    const woods = this.store.woods();
+    return Array.from({ length: grid.staves }, (_, stave) => {
+      const wood = cells[cellAt(grid, stave, grid.courses - 1)] ?? 0;
+      return woods[wood]?.colour ?? '#000000';
+    });
+  });
+
+  /** The layout as far as checks look at it: laying a tile asks for none of them again. */
+  private readonly checked = computed(() => this.store.layout(), { equal: sameForChecks });
+  protected readonly checks = computed(() => runChecks(this.checked()));
+
+  private readonly counted = signal(this.store.layout());
+  protected readonly toCut = computed(() => toCutSentence(this.counted()));
+
+  constructor() {
+    effect((onCleanup) => {
+      const layout = this.store.layout();
+      const rest = setTimeout(() => this.counted.set(layout), COUNT_REST_MS);
+      onCleanup(() => clearTimeout(rest));
+    });
+  }
+}
+
+function sameForChecks(a: Layout, b: Layout): boolean {
+  return (
+    a.shell === b.shell &&
+    a.joint === b.joint &&
+    a.cutter === b.cutter &&
+    a.build === b.build &&
+    a.lengthUnit === b.lengthUnit
+  );
+}
