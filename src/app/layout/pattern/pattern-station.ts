@@ -156,7 +156,10 @@ export class PatternStation {
     const { woods, cells } = layout;
     const tiles = countWoods(cells, woods.length)[index] ?? 0;
     const key = woods[index]?.key;
-    if (tiles === 0) return this.takeOut(key, woods[index === 0 ? 1 : 0]?.key);
+    if (tiles === 0) {
+      this.takeOut(key, woods[index === 0 ? 1 : 0]?.key);
+      return;
+    }
     const data: RemoveWoodQuestion = { woods, index, tiles };
     this.dialogs
       .open<RemoveWoodDialog, RemoveWoodQuestion, number>(RemoveWoodDialog, {

@@ -48,10 +48,10 @@ type Context = CanvasRenderingContext2D;
 /** Paints the overlay; the context's unit is the CSS pixel. */
 export function paintOverlay(context: Context, frame: OverlayFrame): void {
   paintVeil(context, frame);
-  paintTrim(context, frame);
-  paintSeam(context, frame);
   paintTileMarks(context, frame);
   paintStaveNumbers(context, frame);
+  const free = paintTrim(context, frame);
+  paintSeam(context, frame, free);
   paintCourseLetters(context, frame);
 }
 
@@ -69,14 +69,15 @@ function paintVeil(context: Context, frame: OverlayFrame): void {
   const { top, bottom } = sheetSpan(frame);
   const from = toScreen(view, { x: 0, y: 0 }).x;
   const to = toScreen(view, { x: drawing.size.circumference, y: 0 }).x;
-  context.globalAlpha = 0.55;
+  context.globalAlpha = 0.48;
   context.fillStyle = colours.paper;
   if (from > 0) context.fillRect(0, top - 1, from, bottom - top + 2);
   if (to < size.width) context.fillRect(to, top - 1, size.width - to, bottom - top + 2);
   context.globalAlpha = 1;
 }
 
-function paintSeam(context: Context, frame: OverlayFrame): void {
+/** The seam on every turn in view, with its words where they end before `free`. */
+function paintSeam(context: Context, frame: OverlayFrame, free: number): void {
   const { drawing, view, size, colours } = frame;
   const { top, bottom } = sheetSpan(frame);
   const words = `seam: stave ${drawing.grid.staves} meets stave 1`;
@@ -88,13 +89,15 @@ function paintSeam(context: Context, frame: OverlayFrame): void {
       dash: [5, 5],
     });
     const y = Math.min(bottom + 22, size.height - 12);
+    if (x + 16 + widthOf(context, words) > free) continue;
     label(context, words, { x: x + 6, y }, { colour: colours.tealInk, paper: colours.paper });
   }
 }
 
-function paintTrim(context: Context, frame: OverlayFrame): void {
+/** The trim lines with their words at the right; answers up to where the row of words is free. */
+function paintTrim(context: Context, frame: OverlayFrame): number {
   const { view, size, colours, state } = frame;
-  if (!state.trim) return;
+  if (!state.trim) return size.width;
   for (const height of [state.trim.bottom, state.trim.top]) {
     const y = Math.round(toScreen(view, { x: 0, y: height }).y) + 0.5;
     line(context, { x: 0, y }, { x: size.width, y }, 'rgb(255 253 249 / 70%)', { width: 2.6 });
@@ -107,6 +110,7 @@ function paintTrim(context: Context, frame: OverlayFrame): void {
     paper: colours.paper,
     align: 'right',
   });
+  return right.x - widthOf(context, state.trim.words) - 10;
 }
 
 interface LineStyle {
@@ -142,6 +146,13 @@ interface LabelStyle {
   readonly align?: 'left' | 'right';
 }
 
+const WORDS_FONT = '800 12.5px Nunito, sans-serif';
+
+function widthOf(context: Context, words: string): number {
+  context.font = WORDS_FONT;
+  return context.measureText(words).width;
+}
+
 /** Words on a patch of paper, so that they can be read wherever they lie. */
 function label(
   context: Context,
@@ -149,10 +160,9 @@ function label(
   { x, y }: ScreenPoint,
   { colour, paper, align = 'left' }: LabelStyle,
 ): void {
-  context.font = '800 12.5px Nunito, sans-serif';
+  const width = widthOf(context, words);
   context.textBaseline = 'middle';
   context.textAlign = align;
-  const width = context.measureText(words).width;
   context.fillStyle = paper;
   context.globalAlpha = 0.88;
   context.beginPath();
@@ -256,11 +266,9 @@ function paintStaveNumbers(context: Context, frame: OverlayFrame): void {
   const { staves } = drawing.grid;
   const tile = drawing.tileWidth * view.pxPerMm;
   const step = stepFor(tile, 26);
-  const y = Math.max(14, sheetSpan(frame).top - 16);
-  context.globalAlpha = 0.9;
-  context.fillStyle = colours.paper;
-  context.fillRect(0, y - 12, size.width, 24);
-  context.globalAlpha = 1;
+  const { top } = sheetSpan(frame);
+  const y = Math.max(14, top - 16);
+  if (top < y + 16) paintBand(context, frame, y);
   context.font = '700 12.5px Nunito, sans-serif';
   context.textAlign = 'center';
   context.textBaseline = 'middle';
@@ -274,6 +282,14 @@ function paintStaveNumbers(context: Context, frame: OverlayFrame): void {
     const x = toScreen(view, { x: (stave + 0.5) * drawing.tileWidth, y: 0 }).x;
     context.fillText(String(number), x, y + 1);
   }
+}
+
+/** Paper under the numbers while they lie on the tiles. */
+function paintBand(context: Context, { size, colours }: OverlayFrame, y: number): void {
+  context.globalAlpha = 0.9;
+  context.fillStyle = colours.paper;
+  context.fillRect(0, y - 14, size.width, 28);
+  context.globalAlpha = 1;
 }
 
 /** Course letters stay at the left border, each on a patch of paper. */

@@ -1,9 +1,9 @@
+import type { ElementRef } from '@angular/core';
 import {
   afterNextRender,
   Component,
   computed,
   effect,
-  ElementRef,
   inject,
   input,
   output,

@@ -1,4 +1,5 @@
-import { Component, computed, ElementRef, input, output, viewChild } from '@angular/core';
+import type { ElementRef } from '@angular/core';
+import { Component, computed, input, output, viewChild } from '@angular/core';
 import { roundStave } from '@shared/layout/cells';
 import type { ViewSpan } from '../canvas/view-span';
 import { arcPath, staveAngle, stavesTurned, wedgePath } from './ring-geometry';

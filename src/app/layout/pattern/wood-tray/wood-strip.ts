@@ -1,4 +1,5 @@
-import { Component, effect, ElementRef, input, viewChild } from '@angular/core';
+import type { ElementRef } from '@angular/core';
+import { Component, effect, input, viewChild } from '@angular/core';
 import { grainTexture, TEXTURE_PX } from '../grain/grain-texture';
 import type { WoodFigure } from '../grain/wood-figure';
 
