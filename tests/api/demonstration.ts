@@ -10,7 +10,7 @@ import {
 } from '@shared/api/layout';
 import { problemSchema, type ApiProblem } from '@shared/api/problem';
 import { wirePatchOf } from '@shared/api/wire-patch';
-import type { Patch } from '@shared/layout/patch';
+import { fieldChange, type Patch } from '@shared/layout/patch';
 import { readLayout } from '@shared/layout/read-layout';
 import type { Layout } from '@shared/layout/schema';
 import type { Answer, Browser } from './browser';
@@ -43,6 +43,19 @@ export async function draftOf(browser: Browser, layoutId: string): Promise<Layou
 /** An edit as the app sends it. */
 export function editOf(baseRevision: number, patch: Patch): Edit {
   return { baseRevision, idempotencyKey: randomUUID(), patch: wirePatchOf(patch) };
+}
+
+/** The patch that sets one field of the draft. */
+export async function setting(
+  browser: Browser,
+  layoutId: string,
+  ...[path, value]: Parameters<typeof fieldChange> extends [Layout, infer P, infer V]
+    ? [P, V]
+    : never
+): Promise<Patch> {
+  const change = fieldChange(await draftOf(browser, layoutId), path, value);
+  if (!change) throw new Error(`${path} has that value already`);
+  return [change];
 }
 
 /** Lays wood 1 on some tiles that held wood 0. */

@@ -2,13 +2,22 @@ import { randomUUID } from 'node:crypto';
 import { layoutEdits } from '@drizzle/schema/index';
 import { conflictSchema, recordedEditSchema } from '@shared/api/layout';
 import { patchOfWire } from '@shared/api/wire-patch';
-import { applyPatch, fieldChange, type Patch } from '@shared/layout/patch';
-import { layoutFileSchema, type Layout } from '@shared/layout/schema';
+import { applyPatch, type Patch } from '@shared/layout/patch';
+import { layoutFileSchema } from '@shared/layout/schema';
 import { and, eq } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import * as z from 'zod';
 import { signedIn, type Answer, type Browser } from './browser';
-import { draftOf, editOf, laid, newCommission, openLayout, problem, saved } from './demonstration';
+import {
+  draftOf,
+  editOf,
+  laid,
+  newCommission,
+  openLayout,
+  problem,
+  saved,
+  setting,
+} from './demonstration';
 import { appOn, runningApp, type RunningApp } from './running-app';
 
 let running: RunningApp;
@@ -27,17 +36,6 @@ afterAll(() => running.close());
 
 async function newLayout(): Promise<string> {
   return (await newCommission(owner)).layoutId;
-}
-
-async function setting(
-  layoutId: string,
-  ...[path, value]: Parameters<typeof fieldChange> extends [Layout, infer P, infer V]
-    ? [P, V]
-    : never
-): Promise<Patch> {
-  const change = fieldChange(await draftOf(owner, layoutId), path, value);
-  if (!change) throw new Error(`${path} has that value already`);
-  return [change];
 }
 
 function conflictIn(answer: Answer) {
@@ -112,7 +110,7 @@ describe('two people in the same layout', () => {
 
   it('merge when one lays tiles and the other sets the joint', async () => {
     const id = await newLayout();
-    const wider = await setting(id, 'joint.clearance', 0.2);
+    const wider = await setting(owner, id, 'joint.clearance', 0.2);
     await designer.patch(`/layouts/${id}`, editOf(0, laid(1)));
     expect((await maker.patch(`/layouts/${id}`, editOf(0, wider))).status).toBe(200);
     expect((await draftOf(owner, id)).joint.clearance).toBe(0.2);
@@ -141,7 +139,7 @@ describe('two people in the same layout', () => {
   it('are told when each edit is good and both together are not', async () => {
     const id = await newLayout();
     const { woods } = await draftOf(owner, id);
-    const fewer = await setting(id, 'woods', woods.slice(0, 1));
+    const fewer = await setting(owner, id, 'woods', woods.slice(0, 1));
     await designer.patch(`/layouts/${id}`, editOf(0, laid(9)));
     conflictIn(await both.patch(`/layouts/${id}`, editOf(0, fewer)));
     const again = problem(await both.patch(`/layouts/${id}`, editOf(1, fewer)), 400);
@@ -311,53 +309,6 @@ describe('an edit that cannot be taken', () => {
     const huge = laid(...new Array<number>(28_800).fill(28_799));
     const edit = editOf(0, new Array<Patch>(8).fill(huge).flat());
     expect(problem(await owner.patch(`/layouts/${id}`, edit), 413).code).toBe('too-large');
-  });
-});
-
-describe('who may change what', () => {
-  it('lets a designer change size, woods and pattern, but not the joint', async () => {
-    const id = await newLayout();
-    const taller = await setting(id, 'shell.finishedHeight', 220);
-    expect((await designer.patch(`/layouts/${id}`, editOf(0, taller))).status).toBe(200);
-    const wider = await setting(id, 'joint.clearance', 0.2);
-    const refused = problem(await designer.patch(`/layouts/${id}`, editOf(1, wider)), 403);
-    expect(refused.code).toBe('not-allowed');
-  });
-
-  it('lets a maker change joint, cutter and building, but not the pattern', async () => {
-    const id = await newLayout();
-    const cutter = await setting(id, 'cutter.diameter', 3);
-    const build = await setting(id, 'build.turnOver', false);
-    expect((await maker.patch(`/layouts/${id}`, editOf(0, [...cutter, ...build]))).status).toBe(
-      200,
-    );
-    expect(problem(await maker.patch(`/layouts/${id}`, editOf(1, laid(1))), 403).code).toBe(
-      'not-allowed',
-    );
-  });
-
-  it('lets both rename it and choose the unit', async () => {
-    const id = await newLayout();
-    const name = await setting(id, 'name', 'Another name');
-    const unit = await setting(id, 'lengthUnit', 'in');
-    expect((await maker.patch(`/layouts/${id}`, editOf(0, name))).status).toBe(200);
-    expect((await designer.patch(`/layouts/${id}`, editOf(1, unit))).status).toBe(200);
-  });
-
-  it('judges by what really changes: a maker may send a tile that stays as it is', async () => {
-    const id = await newLayout();
-    const same: Patch = [{ kind: 'cells', positions: [1], before: [0], after: [0] }];
-    const cutter = await setting(id, 'cutter.diameter', 3);
-    const edit = editOf(0, [...same, ...cutter]);
-    expect((await maker.patch(`/layouts/${id}`, edit)).status).toBe(200);
-  });
-
-  it('takes an edit whole or not at all', async () => {
-    const id = await newLayout();
-    const wider = await setting(id, 'joint.clearance', 0.2);
-    await designer.patch(`/layouts/${id}`, editOf(0, [...laid(1), ...wider]));
-    expect((await openLayout(owner, id)).revision).toBe(0);
-    expect((await draftOf(owner, id)).cells[1]).toBe(0);
   });
 });
 
