@@ -28,8 +28,8 @@ const LINED_STAVES_MOST = 96;
         }
       </g>
       <path class="line" [attr.d]="lines()" />
-      <path class="halo" [attr.d]="borders()" />
-      <path class="mark" [attr.d]="borders()" />
+      <path class="halo" [attr.d]="borders()" [style.stroke-width]="weight().halo" />
+      <path class="mark" [attr.d]="borders()" [style.stroke-width]="weight().mark" />
       <path class="seam" [attr.d]="'M0 0v' + grid().courses" />
     </svg>
   `,
@@ -58,11 +58,9 @@ const LINED_STAVES_MOST = 96;
     }
     .halo {
       stroke: var(--sheet);
-      stroke-width: 4.5px;
     }
     .mark {
       stroke: var(--ink);
-      stroke-width: 1.8px;
     }
     .seam {
       stroke: var(--teal);
@@ -88,6 +86,12 @@ export class UnrolledPicture {
   protected readonly runs = computed(() => {
     const colours = this.layout().woods.map((wood) => wood.colour);
     return colourRuns({ ...this.grid(), colours, cells: encodeCells(this.layout().cells) });
+  });
+  /** Thinner round small tiles, so that the wood inside still shows. */
+  protected readonly weight = computed(() => {
+    const { staves } = this.grid();
+    if (staves <= 48) return { halo: 4.5, mark: 1.8 };
+    return staves <= LINED_STAVES_MOST ? { halo: 3, mark: 1.4 } : { halo: 0, mark: 1 };
   });
   protected readonly lines = computed(() => {
     const { staves, courses } = this.grid();

@@ -23,7 +23,7 @@ describe('what changed between two versions', () => {
 
   it('tells lengths in the unit of the reader', () => {
     const after = { ...before, shell: { ...before.shell, boardThickness: 25.4 } };
-    const figure = { subject: 'Board thickness', kind: 'text' };
+    const figure = { subject: 'Board', kind: 'text' };
     expect(wordsOf(after).figures).toEqual([{ ...figure, before: '20.00 mm', after: '25.40 mm' }]);
     expect(wordsOf(after, 'in').figures).toEqual([
       { ...figure, before: '0.787 in', after: '1.000 in' },
@@ -33,7 +33,12 @@ describe('what changed between two versions', () => {
   it('shows more decimals where two lengths would read alike', () => {
     const after = { ...before, joint: { ...before.joint, clearance: 0.121 } };
     expect(wordsOf(after).figures).toEqual([
-      { subject: 'Clearance', kind: 'text', before: '0.12 mm', after: '0.121 mm' },
+      {
+        subject: 'Clearance between mating edges',
+        kind: 'text',
+        before: '0.12 mm',
+        after: '0.121 mm',
+      },
     ]);
   });
 
@@ -41,7 +46,7 @@ describe('what changed between two versions', () => {
     const staveJoint = { ...before.joint.staveJoint, reach: 8 };
     const after = { ...before, joint: { ...before.joint, staveJoint } };
     expect(wordsOf(after).figures).toEqual([
-      { subject: 'Stave joint, reach', kind: 'text', before: '7.60 mm', after: '8.00 mm' },
+      { subject: 'Stave joint, tab reach', kind: 'text', before: '7.60 mm', after: '8.00 mm' },
     ]);
   });
 
@@ -93,7 +98,7 @@ describe('what changed between two versions', () => {
       cells: new Uint8Array(30),
     };
     expect(wordsOf(after).figures).toEqual([
-      { subject: 'Staves', kind: 'text', before: '8', after: '10' },
+      { subject: 'Staves round', kind: 'text', before: '8', after: '10' },
     ]);
   });
 

@@ -1,10 +1,11 @@
 /** What changed between two layouts, in the reader's words and unit. */
 import { formatCutter } from '@shared/checks/context';
 import type { Comparison } from '@shared/layout/comparison';
-import type { FieldChange, FieldPath } from '@shared/layout/patch';
+import type { FieldChange } from '@shared/layout/patch';
 import type { Joint, Layout, Wood } from '@shared/layout/schema';
 import { formatAngle, formatLength } from '@shared/units/format';
 import { fromMillimetres, type LengthUnit, type Millimetres } from '@shared/units/length';
+import { fieldName, fieldValue } from './field-names';
 
 /** One thing that reads otherwise than before. */
 export interface ChangedFigure {
@@ -25,38 +26,6 @@ export interface ComparisonWords {
 }
 
 type Parameters = Joint['staveJoint'];
-
-const SUBJECTS: Readonly<Record<Exclude<FieldPath, 'woods'>, string>> = {
-  name: 'Name',
-  lengthUnit: 'Unit',
-  'shell.tileWidth': 'Tile width',
-  'shell.tileHeight': 'Tile height',
-  'shell.finishedOuterDiameter': 'Turned outside to',
-  'shell.finishedInnerDiameter': 'Bored to',
-  'shell.finishedHeight': 'Finished height',
-  'shell.boardThickness': 'Board thickness',
-  'shell.skimAllowance': 'To turn away',
-  'joint.scheme': 'Scheme',
-  'joint.clearance': 'Clearance',
-  'joint.staveJoint': 'Stave joint',
-  'joint.courseJoint': 'Course joint',
-  'cutter.diameter': 'Cutter',
-  'cutter.fluteLength': 'Flute length',
-  'build.way': 'Way of building',
-  'build.turnOver': 'Every other tile face down',
-  'build.spareShare': 'Spares',
-  'build.spareMinimum': 'Spares, least a kind',
-};
-
-const PARAMETER_NAMES: Readonly<Record<string, string>> = {
-  headRadius: 'head radius',
-  filletRadius: 'fillet radius',
-  reach: 'reach',
-  rootWidth: 'root width',
-  flankAngle: 'flank angle',
-  tipRadius: 'tip radius',
-  rootRadius: 'root radius',
-};
 
 /** The comparison of two layouts in words. */
 export function comparisonWords(
@@ -99,59 +68,46 @@ function resizeFigures({ resize }: Comparison): ChangedFigure[] {
   if (!resize) return [];
   const { before, after } = resize;
   return [
-    text('Staves', `${before.staves}`, `${after.staves}`),
-    text('Courses', `${before.courses}`, `${after.courses}`),
+    text(fieldName('shell.staves'), `${before.staves}`, `${after.staves}`),
+    text(fieldName('shell.courses'), `${before.courses}`, `${after.courses}`),
   ].filter((figure) => figure.before !== figure.after);
 }
 
 function figuresOf(change: FieldChange, unit: LengthUnit): ChangedFigure[] {
+  const subject = fieldName(change.path);
   switch (change.path) {
     case 'woods':
       return [];
     case 'joint.staveJoint':
     case 'joint.courseJoint':
-      return jointFigures(SUBJECTS[change.path], change.before, change.after, unit);
+      return jointFigures(change.path, change.before, change.after, unit);
     case 'name':
-    case 'joint.scheme':
-      return [text(SUBJECTS[change.path], change.before, change.after)];
     case 'lengthUnit':
-      return [text(SUBJECTS.lengthUnit, UNIT_NAMES[change.before], UNIT_NAMES[change.after])];
+    case 'joint.scheme':
     case 'build.way':
-      return [text(SUBJECTS['build.way'], wayName(change.before), wayName(change.after))];
     case 'build.turnOver':
-      return [text(SUBJECTS['build.turnOver'], yesNo(change.before), yesNo(change.after))];
+    case 'build.spareMinimum': {
+      const words = (value: unknown) => fieldValue(change.path, value, unit);
+      return [text(subject, words(change.before), words(change.after))];
+    }
     case 'build.spareShare':
-      return [text(SUBJECTS['build.spareShare'], percent(change.before), percent(change.after))];
-    case 'build.spareMinimum':
-      return [text(SUBJECTS['build.spareMinimum'], `${change.before}`, `${change.after}`)];
+      return [text(subject, percent(change.before), percent(change.after))];
     case 'cutter.diameter': {
-      const [was, is] = [change.before, change.after].map((d) => formatCutter(d, unit));
-      return [text(SUBJECTS['cutter.diameter'], was ?? '', is ?? '')];
+      const size = (diameter: Millimetres) => formatCutter(diameter, unit);
+      return [text(subject, size(change.before), size(change.after))];
     }
     default:
-      return [lengths(SUBJECTS[change.path], change.before, change.after, unit)];
+      return [lengths(subject, change.before, change.after, unit)];
   }
 }
 
-const UNIT_NAMES: Readonly<Record<LengthUnit, string>> = { mm: 'millimetres', in: 'inches' };
-
-/** The way of building as it is said in a sentence. */
-export function wayName(way: Layout['build']['way']): string {
-  return way.replaceAll('-', ' ');
-}
-
-/** What a switch shows; the value is data of the document. */
-function yesNo(value: FieldChange['before']): string {
-  return value === true ? 'yes' : 'no';
-}
-
 /** A share in percent, with a decimal where it has one. */
-export function percent(share: number): string {
+function percent(share: number): string {
   return `${Number((share * 100).toFixed(1))} %`;
 }
 
 function jointFigures(
-  joint: string,
+  joint: 'joint.staveJoint' | 'joint.courseJoint',
   before: Parameters,
   after: Parameters,
   unit: LengthUnit,
@@ -161,14 +117,14 @@ function jointFigures(
   const profile =
     before.profile === after.profile
       ? []
-      : [text(`${joint}, profile`, before.profile, after.profile)];
+      : [text(fieldName(`${joint}.profile`), before.profile, after.profile)];
   const names = [...new Set([...was.keys(), ...is.keys()])];
   return [
     ...profile,
     ...names.flatMap((name) => {
       const [from, to] = [was.get(name), is.get(name)];
       if (from === to) return [];
-      const subject = `${joint}, ${PARAMETER_NAMES[name] ?? name}`;
+      const subject = fieldName(`${joint}.${name}`);
       if (name === 'flankAngle') return [text(subject, angle(from), angle(to))];
       if (from !== undefined && to !== undefined) return [lengths(subject, from, to, unit)];
       return [text(subject, lengthOrNone(from, unit), lengthOrNone(to, unit))];

@@ -7,11 +7,10 @@ import type { Contest } from '@shared/layout/rebase';
 import { resizeChange } from '@shared/layout/resize';
 import { firstValueFrom } from 'rxjs';
 import { Trouble } from '../drawing/trouble';
-import { Announcer } from '../platform/announcer';
 import { BarActions } from '../platform/bar-actions';
 import { BarSlot } from '../platform/bar-slot';
 import { ContestDialog, type ContestAnswer, type ContestQuestion } from './contest-dialog';
-import { KeepVersionDialog } from './keep-version-dialog';
+import { KeepVersion } from './keep-version';
 import { LayoutStore } from './layout-store';
 import { LayoutTools } from './layout-tools';
 import { LeaveDialog } from './leave-dialog';
@@ -45,7 +44,7 @@ import { StationsBar } from './stations-bar';
 export class LayoutPage {
   protected readonly store = inject(LayoutStore);
   private readonly dialogs = inject(MatDialog);
-  private readonly announcer = inject(Announcer);
+  private readonly keeping = inject(KeepVersion);
   private readonly slot = inject(BarSlot);
   private asking = false;
 
@@ -82,13 +81,7 @@ export class LayoutPage {
   }
 
   protected keep(): void {
-    const dialog = this.dialogs.open<KeepVersionDialog, LayoutStore, number>(KeepVersionDialog, {
-      data: this.store,
-      width: '520px',
-    });
-    dialog.afterClosed().subscribe((number) => {
-      if (number !== undefined) this.announcer.tell(`Version ${number} is kept.`);
-    });
+    void this.keeping.ask(this.store);
   }
 
   protected warn(event: BeforeUnloadEvent): void {

@@ -13,9 +13,11 @@ import { checksOf, STATIONS } from './stations';
     <nav aria-label="Stations">
       @for (station of stations(); track station.path) {
         <a
+          #link
           [routerLink]="[base(), station.path]"
           routerLinkActive="here"
           ariaCurrentWhenActive="page"
+          (isActiveChange)="$event ? reveal(link) : null"
         >
           @if (station.state) {
             <sl-lamp [state]="station.state" />
@@ -77,4 +79,9 @@ export class StationsBar {
       state: station.lamp === null ? null : worstOf(checksOf(station, checks)),
     }));
   });
+
+  /** On a narrow screen the stations scroll sideways: the one that is open comes into view. */
+  protected reveal(link: HTMLElement): void {
+    link.scrollIntoView({ block: 'nearest', inline: 'nearest' });
+  }
 }

@@ -11,6 +11,8 @@ export interface Station {
 export const STATIONS: readonly Station[] = [
   { path: 'shell', name: 'Shell', lamp: 'shell' },
   { path: 'joint', name: 'Joint', lamp: 'joint' },
+  { path: 'cutting', name: 'Cutting', lamp: 'all' },
+  { path: 'review', name: 'Review', lamp: null },
 ];
 
 /** The checks a station's lamp stands for. */
