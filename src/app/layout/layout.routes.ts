@@ -21,6 +21,18 @@ export const LAYOUT_ROUTES: Routes = [
         title: 'Joint',
         loadComponent: () => import('./joint/joint-station').then((module) => module.JointStation),
       },
+      {
+        path: 'cutting',
+        title: 'Cutting',
+        loadComponent: () =>
+          import('./cutting/cutting-station').then((module) => module.CuttingStation),
+      },
+      {
+        path: 'review',
+        title: 'Review',
+        loadComponent: () =>
+          import('./review/review-station').then((module) => module.ReviewStation),
+      },
     ],
   },
 ];
