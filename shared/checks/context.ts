@@ -28,6 +28,7 @@ export interface CheckContext {
   readonly layout: Layout;
   readonly finishingMargin: number;
   readonly webMinimum: Millimetres;
+  /** The joints its tiles have: the stave joint first, and the course joint when there are courses to join. */
   readonly joints: readonly NamedJoint[];
   readonly outlines: readonly LayoutOutline[];
   readonly fit: LayoutFit;
@@ -53,7 +54,8 @@ export function checkContext(layout: Layout, settings: CheckSettings): CheckCont
     webMinimum: settings.webMinimum ?? WEB_MINIMUM_MM,
     joints: [
       namedJoint('stave joint', staveJoint, clearance),
-      namedJoint('course joint', courseJoint, clearance),
+      // a single course is flat at both ends
+      ...(layout.shell.courses > 1 ? [namedJoint('course joint', courseJoint, clearance)] : []),
     ],
     outlines,
     fit: layoutFit(layout, outlines),

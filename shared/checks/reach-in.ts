@@ -38,7 +38,7 @@ function mouthSentence({ layout, length, cutter }: CheckContext, mouth: Mouth | 
   const size = cutter(layout.cutter.diameter);
   return mouth
     ? `The narrowest socket mouth, on the ${mouth.joint}, is ${length(mouth.width)} wide; the cutter is ${size}.`
-    : `Both joints are waves, open all the way; the cutter is ${size}.`;
+    : `No socket narrows towards its opening; the cutter is ${size}.`;
 }
 
 function gapSentence({ layout, cutter }: CheckContext): string {
