@@ -75,7 +75,8 @@ function namedJoint(
   return { name, parameters, profile: edgeProfile(parameters), mouth };
 }
 
-/** A cutter's size with its unit: "3.175 mm". */
+/** A cutter's size as sentences name it: "3.175 mm", "2.8 mm", "0.125 in". */
 export function formatCutter(diameter: Millimetres, unit: LengthUnit): string {
-  return `${formatCutterFigure(diameter, unit)} ${unit}`;
+  const figure = formatCutterFigure(diameter, unit);
+  return `${unit === 'mm' ? Number(figure) : figure} ${unit}`;
 }

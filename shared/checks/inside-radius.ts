@@ -33,7 +33,7 @@ function held(
 ): Pick<CheckResult, 'result' | 'finding' | 'remedy'> {
   const { fit, layout, finishingMargin, length, cutter } = context;
   const place = placeName(context);
-  // 1.585 and 1.5875 mm are both "1.59 mm": a third decimal tells them apart
+  // 1.586 and 1.5875 mm are both "1.59 mm": a third decimal tells them apart
   const figure = radius !== needed && length(radius) === length(needed) ? cutter : length;
   const size = `The ${place.part} of the ${place.joint} is cut at ${figure(radius)}`;
   const need = `a ${cutter(layout.cutter.diameter)} cutter needs ${figure(needed)}`;

@@ -1,0 +1,31 @@
+import { describe, expect, it } from 'vitest';
+import { CHECK_KEYS, worstOf } from './check';
+import { lantern } from './one-check.fixture';
+import { runChecks } from './run-checks';
+
+describe('all checks', () => {
+  it('come in one order, clear for a ring that can be made', () => {
+    const results = runChecks(lantern());
+    expect(results.map(({ key }) => key)).toEqual(CHECK_KEYS);
+    expect(worstOf(results)).toBe('clear');
+    expect(results.every(({ remedy, reason }) => remedy === '' && reason !== '')).toBe(true);
+  });
+
+  it('do not look at the pattern', () => {
+    const layout = lantern();
+    const painted = { ...layout, cells: layout.cells.map((_, i) => i % 4) };
+    expect(runChecks(painted)).toEqual(runChecks(layout));
+  });
+
+  it('speak the reader’s unit, or else the layout’s own', () => {
+    const inches = { ...lantern(), lengthUnit: 'in' as const };
+    expect(runChecks(inches).find(({ key }) => key === 'web')?.finding).toMatch(/0\.499 in/);
+    const shown = runChecks(inches, { lengthUnit: 'mm' });
+    expect(shown.find(({ key }) => key === 'web')?.finding).toMatch(/12\.68 mm/);
+  });
+});
+
+it('the worst of some results is the worst one, and of none clear', () => {
+  expect(worstOf([{ result: 'clear' }, { result: 'stop' }, { result: 'caution' }])).toBe('stop');
+  expect(worstOf([])).toBe('clear');
+});
