@@ -85,17 +85,26 @@ export function liesOn(
   point: PointMm,
   tolerance: Millimetres = POINT_TOLERANCE,
 ): boolean {
-  if (distance(point, startOf(segment)) <= tolerance) return true;
-  if (distance(point, endOf(segment)) <= tolerance) return true;
-  if (segment.kind === 'line') {
-    const along = subtract(segment.to, segment.from);
-    const share = dot(subtract(point, segment.from), along) / dot(along, along);
-    return share >= 0 && share <= 1 && distanceToLine(segment, point) <= tolerance;
-  }
+  if (isBesideSupport(segment, point, tolerance)) return false;
+  // ends are last: on an arc they cost four sines
   return (
-    Math.abs(distance(point, segment.centre) - segment.radius) <= tolerance &&
-    withinSweep(segment, point)
+    isBetweenEnds(segment, point) ||
+    distance(point, startOf(segment)) <= tolerance ||
+    distance(point, endOf(segment)) <= tolerance
   );
+}
+
+function isBesideSupport(segment: Segment, point: PointMm, tolerance: Millimetres): boolean {
+  return segment.kind === 'line'
+    ? distanceToLine(segment, point) > tolerance
+    : Math.abs(distance(point, segment.centre) - segment.radius) > tolerance;
+}
+
+function isBetweenEnds(segment: Segment, point: PointMm): boolean {
+  if (segment.kind === 'arc') return withinSweep(segment, point);
+  const along = subtract(segment.to, segment.from);
+  const travelled = dot(subtract(point, segment.from), along);
+  return travelled >= 0 && travelled <= dot(along, along);
 }
 
 /** True when the direction from the arc's centre to the point lies within its sweep. */

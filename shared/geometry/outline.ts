@@ -29,13 +29,17 @@ function areaUnder(segment: Segment): number {
 
 /** The box of a chain of segments, exact for arcs. */
 export function boundsOf(segments: readonly Segment[]): Bounds {
-  const points = segments.flatMap(extremesOf);
-  return {
-    minX: Math.min(...points.map((p) => p.x)),
-    minY: Math.min(...points.map((p) => p.y)),
-    maxX: Math.max(...points.map((p) => p.x)),
-    maxY: Math.max(...points.map((p) => p.y)),
-  };
+  // plain loops: every search for crossings asks for the box of each segment
+  let [minX, minY, maxX, maxY] = [Infinity, Infinity, -Infinity, -Infinity];
+  for (const segment of segments) {
+    for (const { x, y } of extremesOf(segment)) {
+      if (x < minX) minX = x;
+      if (x > maxX) maxX = x;
+      if (y < minY) minY = y;
+      if (y > maxY) maxY = y;
+    }
+  }
+  return { minX, minY, maxX, maxY };
 }
 
 const QUARTER = Math.PI / 2;

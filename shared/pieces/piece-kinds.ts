@@ -18,31 +18,53 @@ interface Growing {
   halfTurned: number[];
 }
 
-/** The piece kinds of a layout, by wood and then in the order of its tiles from A 1. */
+/** The kinds cut from one drawing, by wood. */
+type KindsOfDrawing = (Growing | undefined)[];
+
+/**
+ * The piece kinds of a layout, by wood and then in the order of its tiles from A 1. Every tile is looked at
+ * once; whatever needs more than an array's place is done once a course.
+ */
 export function pieceKinds(layout: Layout): PieceKind[] {
   const { staves, courses } = layout.shell;
-  const kinds = new Map<string, Growing>();
+  const found: Growing[] = [];
+  const kinds = new Map<string, KindsOfDrawing>();
   const drawings = new Map<string, Drawing>();
   for (let course = 0; course < courses; course++) {
     const down = liesFaceDown(layout, course);
     // along a course only the parity of the stave matters
-    const alongCourse = [0, 1].map((stave) =>
-      drawingOf(
-        drawings,
-        tileEdges(layout.joint.scheme, layout.shell, stave, course),
-        down ? 'down' : 'up',
-      ),
-    );
+    const alongCourse = [0, 1].map((stave) => {
+      const edges = tileEdges(layout.joint.scheme, layout.shell, stave, course);
+      const drawing = drawingOf(drawings, edges, down ? 'down' : 'up');
+      return { drawing, kinds: kindsOf(kinds, drawing) };
+    });
     for (let stave = 0; stave < staves; stave++) {
       const position = course * staves + stave;
-      const drawing = alongCourse[stave % 2] as Drawing;
-      const kind = kindOf(kinds, layout.cells[position] ?? 0, drawing);
+      const here = alongCourse[stave % 2] as (typeof alongCourse)[number];
+      const wood = layout.cells[position] ?? 0;
+      const kind = (here.kinds[wood] ??= firstOf(found, wood, here.drawing));
       kind.positions.push(position);
       if (down) kind.faceDown.push(position);
-      if (drawing.halfTurned) kind.halfTurned.push(position);
+      if (here.drawing.halfTurned) kind.halfTurned.push(position);
     }
   }
-  return [...kinds.values()]
+  return numbered(found, layout);
+}
+
+function kindsOf(kinds: Map<string, KindsOfDrawing>, { key }: Drawing): KindsOfDrawing {
+  const known = kinds.get(key) ?? [];
+  kinds.set(key, known);
+  return known;
+}
+
+function firstOf(found: Growing[], wood: number, { edges, mirrored }: Drawing): Growing {
+  const kind: Growing = { wood, edges, mirrored, positions: [], faceDown: [], halfTurned: [] };
+  found.push(kind);
+  return kind;
+}
+
+function numbered(found: readonly Growing[], layout: Layout): PieceKind[] {
+  return [...found]
     .sort((a, b) => a.wood - b.wood)
     .map((kind, i) => ({
       ...kind,
@@ -50,16 +72,6 @@ export function pieceKinds(layout: Layout): PieceKind[] {
       count: kind.positions.length,
       spares: spareCount(kind.positions.length, layout.build),
     }));
-}
-
-function kindOf(kinds: Map<string, Growing>, wood: number, drawing: Drawing): Growing {
-  const key = `${wood} ${drawing.key}`;
-  const known = kinds.get(key);
-  if (known) return known;
-  const { edges, mirrored } = drawing;
-  const kind: Growing = { wood, edges, mirrored, positions: [], faceDown: [], halfTurned: [] };
-  kinds.set(key, kind);
-  return kind;
 }
 
 /** How a tile's piece lies on the machine. */
