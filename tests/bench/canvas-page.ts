@@ -15,29 +15,8 @@ import {
   type ViewBounds,
   type Viewport,
 } from '../../src/app/layout/pattern/canvas/viewport';
+import type { CanvasBenchPage, DriveFigures } from './canvas-drives';
 import { startingLayout } from '@shared/layout/starting-layout';
-
-export interface DriveFigures {
-  /** Milliseconds of script a frame, and between frames, in the order they came. */
-  readonly script: number[];
-  readonly frames: number[];
-}
-
-export interface CanvasBench {
-  /** Milliseconds from nothing to every chunk drawn. */
-  open(staves: number, courses: number): Promise<number>;
-  zoom(factor: number): Promise<void>;
-  pan(frames: number): Promise<DriveFigures>;
-  paint(frames: number): Promise<DriveFigures>;
-  barePan(frames: number): Promise<DriveFigures>;
-  barePaint(frames: number): Promise<DriveFigures>;
-}
-
-declare global {
-  interface Window {
-    canvasBench: CanvasBench;
-  }
-}
 
 const COLOURS: CanvasColours = {
   paper: '#f4f1ea',
@@ -159,7 +138,7 @@ function layAt(frame: number): number[] {
   return positions;
 }
 
-window.canvasBench = {
+(globalThis as unknown as CanvasBenchPage).canvasBench = {
   async open(staves, courses) {
     clearPage();
     const began = performance.now();

@@ -22,6 +22,12 @@ export const LAYOUT_ROUTES: Routes = [
         loadComponent: () => import('./joint/joint-station').then((module) => module.JointStation),
       },
       {
+        path: 'pattern',
+        title: 'Pattern',
+        loadComponent: () =>
+          import('./pattern/pattern-station').then((module) => module.PatternStation),
+      },
+      {
         path: 'cutting',
         title: 'Cutting',
         loadComponent: () =>

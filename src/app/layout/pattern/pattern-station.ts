@@ -70,6 +70,11 @@ export class PatternStation {
     const tile = this.standsOn() ?? this.pointedAt();
     return tile && this.mode() === 'lay' ? [...this.tool.positionsFor([tile])] : [];
   });
+  protected readonly hint = computed(() =>
+    this.mode() === 'lay'
+      ? 'Drag with Space or the middle button, or with two fingers, to turn the shell.'
+      : 'Drag to turn the shell; Ctrl and the wheel, or two fingers, come nearer.',
+  );
   protected readonly label = computed(() => {
     const { staves, courses } = this.store.grid();
     const hand =

@@ -10,6 +10,7 @@ describe('the words of the sentence', () => {
       '2 courses down',
     ]);
     expect([tilesWords(1), tilesWords(0)]).toEqual(['1 tile', '0 tiles']);
+    expect(tilesWords(12_305)).toBe('12\u202f305 tiles');
   });
 
   it('write a wood small inside a sentence, but not initials', () => {

@@ -30,9 +30,15 @@ export function stepWords(step: number): string {
   return `${count} ${count === 1 ? 'course' : 'courses'} ${step > 0 ? 'up' : 'down'}`;
 }
 
-/** "1 tile", "150 tiles". */
+/** "1 tile", "150 tiles", "12 305 tiles". */
 export function tilesWords(count: number): string {
-  return count === 1 ? '1 tile' : `${count} tiles`;
+  return counted(count, 'tile');
+}
+
+/** A count with its noun; thousands apart by a narrow space that does not break. */
+export function counted(count: number, noun: string): string {
+  const figure = count.toLocaleString('en').replaceAll(',', '\u202f');
+  return `${figure} ${noun}${count === 1 ? '' : 's'}`;
 }
 
 /** A wood's name inside a sentence: "Black walnut" → "black walnut"; "MDF" stays. */

@@ -49,9 +49,9 @@ type Context = CanvasRenderingContext2D;
 export function paintOverlay(context: Context, frame: OverlayFrame): void {
   paintVeil(context, frame);
   paintTileMarks(context, frame);
-  paintStaveNumbers(context, frame);
   const free = paintTrim(context, frame);
   paintSeam(context, frame, free);
+  paintStaveNumbers(context, frame);
   paintCourseLetters(context, frame);
 }
 
@@ -273,6 +273,9 @@ function paintStaveNumbers(context: Context, frame: OverlayFrame): void {
   context.textAlign = 'center';
   context.textBaseline = 'middle';
   context.fillStyle = colours.mute;
+  context.strokeStyle = colours.paper;
+  context.lineWidth = 5;
+  context.lineJoin = 'round';
   const first = Math.floor(view.leftMm / drawing.tileWidth);
   const last = Math.ceil((view.leftMm + size.width / view.pxPerMm) / drawing.tileWidth);
   for (let stave = first; stave <= last; stave++) {
@@ -280,6 +283,7 @@ function paintStaveNumbers(context: Context, frame: OverlayFrame): void {
     if (number !== 1 && number % step !== 0) continue;
     if (number !== 1 && staves + 1 - number < step * 0.7) continue;
     const x = toScreen(view, { x: (stave + 0.5) * drawing.tileWidth, y: 0 }).x;
+    if (step > 1) context.strokeText(String(number), x, y + 1);
     context.fillText(String(number), x, y + 1);
   }
 }
@@ -295,7 +299,7 @@ function paintBand(context: Context, { size, colours }: OverlayFrame, y: number)
 /** Course letters stay at the left border, each on a patch of paper. */
 function paintCourseLetters(context: Context, frame: OverlayFrame): void {
   const { drawing, view, size, colours } = frame;
-  const step = stepFor(drawing.tileHeight * view.pxPerMm, 24);
+  const step = stepFor(drawing.tileHeight * view.pxPerMm, 28);
   const { bottom } = sheetSpan(frame);
   context.font = '800 12.5px Nunito, sans-serif';
   context.textAlign = 'center';

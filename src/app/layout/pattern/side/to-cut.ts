@@ -2,7 +2,7 @@
 import { cutList } from '@shared/pieces/cut-list';
 import { edgesKey } from '@shared/pieces/tile-outline';
 import type { Layout } from '@shared/layout/schema';
-import { tilesWords } from '../sentence-words';
+import { counted, tilesWords } from '../sentence-words';
 
 /** "288 tiles in 4 outlines, 10 piece kinds, with 29 spares". */
 export function toCutSentence(layout: Layout): string {
@@ -12,8 +12,4 @@ export function toCutSentence(layout: Layout): string {
   );
   const kinds = `${counted(outlines.size, 'outline')}, ${counted(rows.length, 'piece kind')}`;
   return `${tilesWords(tiles)} in ${kinds}, with ${counted(spares, 'spare')}`;
-}
-
-function counted(count: number, noun: string): string {
-  return `${count} ${noun}${count === 1 ? '' : 's'}`;
 }
