@@ -1,12 +1,13 @@
 import { expect, test } from 'vitest';
-import { ringsOfStaves, ringsOfWidth } from './wished-diameter';
+import { ringsOfStaves, ringsOfWidth, type DiameterWish } from './wished-diameter';
 
-const wish = {
+const wish: DiameterWish = {
   outerDiameter: 280,
   wall: 9,
   skimAllowance: 0.5,
   reach: 7.6,
   boardThickness: 14,
+  scheme: 'alternating',
 };
 
 test('tiles of 28 mm make a 280 mm shell with 32 staves, not with 31', () => {
@@ -23,6 +24,13 @@ test('each ring offered leaves the skim allowance and a board thick enough', () 
     expect(ring.boardThickness).toBeGreaterThanOrEqual(ring.boardLeast);
     expect(ring.boardThickness).toBeGreaterThanOrEqual(wish.boardThickness);
   }
+});
+
+test('alternating tabs are offered even rings only, tabs one way all of them', () => {
+  const staves = (scheme: DiameterWish['scheme']) =>
+    ringsOfWidth({ ...wish, scheme }, 28).map((ring) => ring.staves);
+  expect(staves('alternating')).toEqual([32, 34, 36, 38, 40]);
+  expect(staves('one-way')).toEqual([32, 33, 34, 35, 36]);
 });
 
 test('a number of staves gets the narrowest tile in half millimetres', () => {

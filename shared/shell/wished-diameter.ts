@@ -2,6 +2,7 @@
  * Starting from a wished diameter: which rings leave enough wood to turn to it. The flats must lie at least
  * the skim allowance outside the turned circle: a_o = w / (2 tan β) ≥ D/2 + s, with β = 180°/N.
  */
+import type { Scheme } from '../joint/parameters';
 import { BOUNDS } from '../layout/schema';
 import { toRadians } from '../units/angle';
 import type { Millimetres } from '../units/length';
@@ -17,6 +18,8 @@ export interface DiameterWish {
   /** How far the stave joint stands out. */
   readonly reach: Millimetres;
   readonly boardThickness: Millimetres;
+  /** Alternating tabs close only round an even number of staves, so no odd ring is offered for them. */
+  readonly scheme: Scheme;
 }
 
 /** A ring that can be turned to the wished diameter. */
@@ -42,6 +45,7 @@ export function ringsOfWidth(wish: DiameterWish, tileWidth: Millimetres): RingPr
   const counts = Array.from({ length: 2 * OFFERED }, (_, i) => from + i);
   return counts
     .filter((staves) => staves <= BOUNDS.staves.most)
+    .filter((staves) => wish.scheme === 'one-way' || staves % 2 === 0)
     .map((staves) => proposalOf(wish, staves, tileWidth))
     .filter((proposal) => proposal !== null)
     .slice(0, OFFERED);

@@ -20,7 +20,6 @@ import { openLayoutText } from './open-layout-text';
       type="button"
       class="wide"
       [disabled]="!store.canUndo()"
-      [attr.aria-label]="undo()"
       [title]="undo() + ' (Ctrl Z)'"
       (click)="store.undo()"
     >
@@ -31,7 +30,6 @@ import { openLayoutText } from './open-layout-text';
       type="button"
       class="wide"
       [disabled]="!store.canRedo()"
-      [attr.aria-label]="redo()"
       [title]="redo() + ' (Ctrl Shift Z)'"
       (click)="store.redo()"
     >

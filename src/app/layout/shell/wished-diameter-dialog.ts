@@ -80,6 +80,7 @@ export class WishedDiameterDialog {
       skimAllowance: shell.skimAllowance,
       reach: joint.staveJoint.reach,
       boardThickness: shell.boardThickness,
+      scheme: joint.scheme,
     };
   }
 
