@@ -25,6 +25,9 @@ import {
 
 const PLAIN_WOOD = { name: 'wood', colour: '#C8B08A' };
 
+/** Windows narrower than this have room for short words only, in pixels. */
+const NARROW = 480;
+
 interface Drawing {
   readonly layout: Layout;
   readonly unit: LengthUnit;
@@ -90,20 +93,21 @@ function nameMarks({ frame, tabWood, socketWood }: Drawing): Mark[] {
   const upright = frame.joint === 'courseJoint';
   const box = (piece: JointPiece) => shownBox(frame, piece);
   const [tab, socket] = [box(frame.tab), box(frame.socket)];
+  const short = size.width < NARROW;
   const foot = Math.min(tab.bottom, at.y + size.height) - 22;
   const head = Math.max(socket.top, at.y) + 26;
   return [
     {
       kind: 'text',
       at: { x: tab.left + 14, y: foot },
-      text: `tab piece · ${tabWood.name.toLowerCase()}`,
+      text: short ? 'tab piece' : `tab piece · ${tabWood.name.toLowerCase()}`,
       anchor: 'start',
       look: inkOn(tabWood.colour),
     },
     {
       kind: 'text',
       at: upright ? { x: socket.left + 14, y: head } : { x: socket.right - 14, y: head },
-      text: `socket piece · ${socketWood.name.toLowerCase()}`,
+      text: short ? 'socket piece' : `socket piece · ${socketWood.name.toLowerCase()}`,
       anchor: upright ? 'start' : 'end',
       look: inkOn(socketWood.colour),
     },
@@ -233,11 +237,17 @@ function socketCutterMarks({ frame, layout, socketWood }: Drawing): Mark[] {
     {
       kind: 'text',
       at: beside,
-      text: fits ? 'cutter in the socket' : 'cutter does not get in',
+      text: socketWords(fits ? 'fits' : 'stuck', frame),
       anchor: frame.joint === 'courseJoint' ? 'start' : 'middle',
       look: inkOn(socketWood.colour),
     },
   ];
+}
+
+function socketWords(cutter: 'fits' | 'stuck', { joint, window }: JointFrame): string {
+  if (cutter === 'stuck') return 'cutter does not get in';
+  const short = window.size.width < NARROW && joint === 'staveJoint';
+  return short ? 'cutter' : 'cutter in the socket';
 }
 
 function placeIn(piece: JointPiece, diameter: number): CutterPlace | null {

@@ -42,6 +42,9 @@ export function ringPicture(layout: Layout, unit: LengthUnit, size: PixelSize): 
   };
 }
 
+/** Pictures narrower than this have their words set in short lines, in pixels. */
+const NARROW = 560;
+
 interface Place {
   readonly view: View;
   /** Of the corners, in pixels. */
@@ -148,11 +151,11 @@ function proudWords(
   size: PixelSize,
   unit: LengthUnit,
 ): Mark[] {
-  const lines = [
-    `the tab stands ${formatLength(ring.tabProud, unit)}`,
-    'proud outside, and lies',
-    'as much higher inside',
-  ];
+  const stands = `the tab stands ${formatLength(ring.tabProud, unit)}`;
+  const lines =
+    size.width < NARROW
+      ? [stands, 'proud outside, and lies', 'as much higher inside']
+      : [`${stands} proud outside`, 'and lies as much higher inside'];
   const x = Math.max(8, lens.centre.x - lens.radius - 14);
   return lines.map((text, i) => ({
     kind: 'text',
