@@ -24,12 +24,19 @@ import {
   openDraft,
   withAnswer,
   withEdit,
+  withLive,
   withSave,
   withTheirs,
   type Draft,
   type Met,
   type Save,
 } from '../../src/app/layout/draft';
+
+interface Edit {
+  readonly patch: Patch;
+  readonly by: string;
+  readonly key: string;
+}
 
 interface Answer {
   readonly kind: 'saved' | 'conflict';
@@ -39,7 +46,7 @@ interface Answer {
 /** The merge rule of the API: edits that do not overlap merge, the rest is refused with what changed. */
 class SimulatedServer {
   layout = smallLayout();
-  private readonly edits: { patch: Patch; by: string }[] = [];
+  private readonly edits: Edit[] = [];
   private readonly answers = new Map<string, Answer>();
 
   save(by: string, save: Save): Answer {
@@ -51,20 +58,26 @@ class SimulatedServer {
       return { kind: 'conflict', body: { revision: this.edits.length, others } };
     }
     this.layout = applyPatch(this.layout, save.patch);
-    this.edits.push({ patch: save.patch, by });
+    this.edits.push({ patch: save.patch, by, key: save.key });
     const answer: Answer = { kind: 'saved', body: { revision: this.edits.length, others } };
     this.answers.set(save.key, answer);
     return answer;
   }
+
+  /** The edit that made a revision, as the live stream brings it; null when there is none yet. */
+  edit(revision: number): RecordedEdit | null {
+    const edit = this.edits[revision - 1];
+    return edit ? recorded(edit, revision) : null;
+  }
 }
 
-function recorded(edit: { patch: Patch; by: string }, revision: number): RecordedEdit {
+function recorded(edit: Edit, revision: number): RecordedEdit {
   const id = '00000000-0000-4000-8000-000000000000';
   return {
     revision,
     patch: wirePatchOf(edit.patch),
     by: { id, name: edit.by },
-    idempotencyKey: id,
+    idempotencyKey: edit.key,
   };
 }
 
@@ -83,6 +96,13 @@ class Client {
     if (patch.length > 0) this.draft = withEdit(this.draft, patch);
   }
 
+  /** The stream brings the next edit. */
+  hear(): void {
+    const edit = this.server.edit(this.draft.revision + 1);
+    const met = edit && withLive(this.draft, edit);
+    if (met) this.settle(met);
+  }
+
   save(way: 'answered' | 'answer lost'): void {
     this.saves += 1;
     this.draft = withSave(this.draft, `${this.name} ${this.saves}`);
@@ -94,7 +114,9 @@ class Client {
 
   private settle({ draft, contests }: Met): void {
     this.draft = draft;
-    expect(draft.waiting.reduce(applyPatch, draft.confirmed)).toEqual(draft.local);
+    const standing = draft.inFlight ? [draft.inFlight.standing] : [];
+    const mine = [...standing, ...draft.waiting];
+    expect(mine.reduce(applyPatch, draft.confirmed)).toEqual(draft.local);
     for (const contest of contests) {
       if (this.keepsMine()) this.edit((layout) => mineAgain(layout, contest));
     }
@@ -134,7 +156,10 @@ const editOf = fc.oneof(
 const script = fc.array(
   fc.record({
     who: fc.nat(1),
-    act: fc.oneof(editOf, fc.constantFrom('answered' as const, 'answer lost' as const)),
+    act: fc.oneof(
+      editOf,
+      fc.constantFrom('answered' as const, 'answer lost' as const, 'hear' as const),
+    ),
   }),
   { maxLength: 40 },
 );
@@ -149,7 +174,8 @@ test('two clients converge on the document of the server', () => {
       const ines = new Client('Ines', server, keepsMine);
       for (const { who, act } of steps) {
         const client = who === 0 ? runa : ines;
-        if (typeof act === 'string') client.save(act);
+        if (act === 'hear') client.hear();
+        else if (typeof act === 'string') client.save(act);
         else client.edit(act);
       }
       comeToRest([runa, ines]);

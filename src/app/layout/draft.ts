@@ -3,7 +3,7 @@
  * that wait, and the gesture under the hand. Every function returns a new draft; nothing here knows about
  * time or the network, so two of them can be played against a simulated server in a test.
  */
-import type { EditSaved } from '@shared/api/layout';
+import type { EditSaved, RecordedEdit } from '@shared/api/layout';
 import { patchOfWire } from '@shared/api/wire-patch';
 import {
   applyPatch,
@@ -32,6 +32,8 @@ export interface Save {
   readonly key: string;
   readonly baseRevision: number;
   readonly patch: Patch;
+  /** What it comes to on the document as confirmed by now: others' edits may have come in since it was sent. */
+  readonly standing: Patch;
 }
 
 /** A draft after others' edits came in. */
@@ -97,7 +99,7 @@ export function withSave(draft: Draft, key: string): Draft {
   const patch = all.slice(0, CHANGES_MOST);
   return {
     ...draft,
-    inFlight: { key, baseRevision: draft.revision, patch },
+    inFlight: { key, baseRevision: draft.revision, patch, standing: patch },
     waiting: rest.length > 0 ? [rest] : [],
   };
 }
@@ -109,8 +111,8 @@ export function isSaved(draft: Draft): boolean {
 
 /** The draft after the server took the save; others' edits it merged with come first. */
 export function withAnswer(draft: Draft, saved: EditSaved): Met {
-  const inFlight = draft.inFlight?.patch ?? [];
-  const theirs = theirPatch(saved);
+  const inFlight = draft.inFlight?.standing ?? [];
+  const theirs = theirPatch(draft, saved);
   const { mine, ...met } = rebase(draft.confirmed, theirs, [inFlight, ...unsent(draft)]);
   const [confirmedMine = [], ...rest] = mine;
   const confirmed = applyPatch(applyPatch(draft.confirmed, theirs), confirmedMine);
@@ -119,16 +121,40 @@ export function withAnswer(draft: Draft, saved: EditSaved): Met {
 
 /** The draft after the server refused the save because others' edits overlap it: mine goes on top of theirs. */
 export function withTheirs(draft: Draft, conflict: EditSaved): Met {
-  const theirs = theirPatch(conflict);
-  const returned = draft.inFlight ? [draft.inFlight.patch] : [];
+  const theirs = theirPatch(draft, conflict);
+  const returned = draft.inFlight ? [draft.inFlight.standing] : [];
   const { mine, ...met } = rebase(draft.confirmed, theirs, [...returned, ...unsent(draft)]);
   const confirmed = applyPatch(draft.confirmed, theirs);
   return { ...met, theirs, draft: settled(draft, confirmed, conflict.revision, mine, met.layout) };
 }
 
+/**
+ * The draft after an edit came in live, between saves. My own comes back this way too, perhaps before its
+ * answer. Null when the edit is known already, or when one before it is missing.
+ */
+export function withLive(draft: Draft, edit: RecordedEdit): Met | null {
+  if (edit.revision !== draft.revision + 1) return null;
+  const { inFlight } = draft;
+  if (inFlight?.key === edit.idempotencyKey) {
+    return withAnswer(draft, { revision: edit.revision, others: [] });
+  }
+  const theirs = patchOfWire(edit.patch) ?? [];
+  const sent = inFlight ? [inFlight.standing] : [];
+  const { mine, ...met } = rebase(draft.confirmed, theirs, [...sent, ...unsent(draft)]);
+  const confirmed = applyPatch(draft.confirmed, theirs);
+  const rest = mine.slice(sent.length);
+  const next = settled(draft, confirmed, edit.revision, rest, met.layout);
+  const standing = mine[0] ?? [];
+  return {
+    ...met,
+    theirs,
+    draft: inFlight ? { ...next, inFlight: { ...inFlight, standing } } : next,
+  };
+}
+
 /** The draft with the save under way taken back, because the server will never take it; later edits stay. */
 export function withSaveTakenBack(draft: Draft): Draft {
-  const refused = draft.inFlight?.patch ?? [];
+  const refused = draft.inFlight?.standing ?? [];
   const base = applyPatch(draft.confirmed, refused);
   const { mine, layout, contests } = rebase(base, invertPatch(refused), unsent(draft));
   const taken = settled(draft, draft.confirmed, draft.revision, mine, layout);
@@ -159,8 +185,10 @@ function settled(
   };
 }
 
-function theirPatch(answer: EditSaved): Patch {
-  return answer.others.flatMap((edit) => patchOfWire(edit.patch) ?? []);
+/** Others' edits in an answer, without those that came in live before it. */
+function theirPatch(draft: Draft, answer: EditSaved): Patch {
+  const news = answer.others.filter((edit) => edit.revision > draft.revision);
+  return news.flatMap((edit) => patchOfWire(edit.patch) ?? []);
 }
 
 /** One patch with the effect of all in turn. Halves first, so that a long stroke costs n log n, not n². */
