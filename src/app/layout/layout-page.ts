@@ -1,11 +1,12 @@
 import { Component, computed, effect, inject, input, untracked } from '@angular/core';
+import { toSignal } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
-import { RouterOutlet } from '@angular/router';
+import { NavigationEnd, Router, RouterOutlet } from '@angular/router';
 import { fieldChange } from '@shared/layout/patch';
 import type { Contest } from '@shared/layout/rebase';
 import { resizeChange } from '@shared/layout/resize';
-import { firstValueFrom } from 'rxjs';
+import { filter, firstValueFrom, map, startWith } from 'rxjs';
 import { Trouble } from '../drawing/trouble';
 import { BarActions } from '../platform/bar-actions';
 import { BarSlot } from '../platform/bar-slot';
@@ -13,9 +14,12 @@ import { ContestDialog, type ContestAnswer, type ContestQuestion } from './conte
 import { KeepVersion } from './keep-version';
 import { LayoutStore } from './layout-store';
 import { LayoutTools } from './layout-tools';
+import { LiveEvents } from './live-events';
 import { LeaveDialog } from './leave-dialog';
+import { PeopleHere } from './people-here';
 import { SavePill } from './save-pill';
 import { SaveTrouble } from './save-trouble';
+import { STATIONS } from './stations';
 import { StationsBar } from './stations-bar';
 
 /** The open layout: its bar, its stations, and everything about saving that a person must see. */
@@ -25,13 +29,14 @@ import { StationsBar } from './stations-bar';
     BarActions,
     LayoutTools,
     MatButton,
+    PeopleHere,
     RouterOutlet,
     SavePill,
     SaveTrouble,
     StationsBar,
     Trouble,
   ],
-  providers: [LayoutStore],
+  providers: [LiveEvents, LayoutStore],
   templateUrl: './layout-page.html',
   styleUrl: './layout-page.scss',
   host: {
@@ -46,7 +51,16 @@ export class LayoutPage {
   private readonly dialogs = inject(MatDialog);
   private readonly keeping = inject(KeepVersion);
   private readonly slot = inject(BarSlot);
+  private readonly live = inject(LiveEvents);
   private asking = false;
+  private readonly path = toSignal(
+    inject(Router).events.pipe(
+      filter((event) => event instanceof NavigationEnd),
+      map((event) => event.urlAfterRedirects),
+      startWith(inject(Router).url),
+    ),
+    { requireSync: true },
+  );
 
   readonly commissionId = input.required<string>();
   protected readonly base = computed(() => `/commissions/${this.commissionId()}/layout`);
@@ -64,6 +78,12 @@ export class LayoutPage {
     effect((onCleanup) => {
       this.slot.crumb.set(this.store.opened()?.commission.title ?? null);
       onCleanup(() => this.slot.crumb.set(null));
+    });
+    effect(() => {
+      const station = STATIONS.find(({ path }) => this.path().includes(`/layout/${path}`));
+      if (station && this.store.opened()) {
+        untracked(() => this.live.moveTo({ station: station.path, tile: null }));
+      }
     });
     effect(() => {
       const contest = this.store.contests()[0];

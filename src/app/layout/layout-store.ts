@@ -4,14 +4,22 @@
  */
 import {
   computed,
+  effect,
   inject,
   Injectable,
   linkedSignal,
   signal,
+  untracked,
   type OnDestroy,
   type Signal,
 } from '@angular/core';
-import { conflictSchema, type Edit, type EditSaved, type OpenLayout } from '@shared/api/layout';
+import {
+  conflictSchema,
+  type Edit,
+  type EditSaved,
+  type OpenLayout,
+  type RecordedEdit,
+} from '@shared/api/layout';
 import type { VersionKept } from '@shared/api/version';
 import { wirePatchOf } from '@shared/api/wire-patch';
 import { runChecks } from '@shared/checks/run-checks';
@@ -33,6 +41,7 @@ import {
   withEdit,
   withGestureFinished,
   withGestureTakenBack,
+  withLive,
   withMove,
   withSave,
   withSaveTakenBack,
@@ -42,7 +51,9 @@ import {
   type Save,
 } from './draft';
 import { EditHistory } from './edit-history';
+import { KeptDrafts, type DraftKeeper } from './kept-drafts';
 import { LayoutApi, type SaveWay } from './layout-api';
+import { LiveEvents } from './live-events';
 import { SaveQueue, type Attempt, type SaveState } from './save-queue';
 
 export interface OpenedLayout {
@@ -76,6 +87,9 @@ export interface Gesture {
 export class LayoutStore implements OnDestroy {
   private readonly api = inject(LayoutApi);
   private readonly session = inject(SessionStore);
+  private readonly live = inject(LiveEvents);
+  private readonly keptDrafts = inject(KeptDrafts);
+  private readonly keeper = signal<DraftKeeper | null>(null);
   private readonly draft = signal<Draft | null>(null);
   private readonly opening = signal<Opening>({ kind: 'opening' });
   private readonly openedLayout = signal<OpenedLayout | null>(null);
@@ -131,9 +145,21 @@ export class LayoutStore implements OnDestroy {
   readonly contests = this.openContests.asReadonly();
   /** Why the server will never take my last edit, which was taken back; null when there is no such thing. */
   readonly refused = this.refusedEdit.asReadonly();
+  /** Everybody else who has the layout open. */
+  readonly people = this.live.people;
   readonly applied$: Observable<Applied> = this.appliedSubject.asObservable();
 
+  constructor() {
+    const unsent = computed(() => this.draft(), { equal: sameUnsent });
+    effect(() => {
+      const draft = unsent();
+      const keeper = this.keeper();
+      if (draft && keeper) untracked(() => keeper.keep(draft));
+    });
+  }
+
   ngOnDestroy(): void {
+    this.keeper()?.leave();
     this.queue.stop();
     this.appliedSubject.complete();
   }
@@ -143,7 +169,11 @@ export class LayoutStore implements OnDestroy {
     this.commissionId = commissionId;
     this.opening.set({ kind: 'opening' });
     try {
-      this.show(await this.api.open(commissionId));
+      const open = await this.api.open(commissionId);
+      this.keeper()?.leave();
+      const keeper = await this.keptDrafts.claim(this.session.person()?.id ?? '', open.id);
+      this.show(open, keeper.found);
+      this.keeper.set(keeper);
     } catch (thrown) {
       this.opening.set({ kind: 'failed', failure: apiFailureOf(thrown) });
     }
@@ -152,7 +182,10 @@ export class LayoutStore implements OnDestroy {
   /** Opens again after a failure, or tries a failed save again at once. */
   retry(): void {
     if (this.opening().kind === 'failed') void this.open(this.commissionId);
-    else this.queue.retry();
+    else {
+      this.queue.retry();
+      this.live.retry();
+    }
   }
 
   /** Saves everything now; resolves when it is saved or failed, `saving` says which. */
@@ -229,16 +262,24 @@ export class LayoutStore implements OnDestroy {
     return draft;
   }
 
-  private show(open: OpenLayout): void {
+  private show(open: OpenLayout, kept: Draft | null): void {
     const { revision, id, commission, lastVersion } = open;
     const reading = readLayout(open.layout);
     if (!reading.ok) throw new ApiFailure(200, 'failed', UNREADABLE);
-    this.draft.set(openDraft(reading.layout, revision));
+    // edits that never reached the server go on from where they stood; what others did since comes in live
+    const unsent = kept && kept.revision <= revision ? kept : null;
+    this.draft.set(unsent ?? openDraft(reading.layout, revision));
     this.openedLayout.set({ id, commission, lastVersion });
     this.history.forget();
     this.overlaid.set(new Set());
     this.opening.set({ kind: 'open' });
     this.appliedSubject.next({ patch: [], origin: 'opened' });
+    if (unsent) this.queue.touch();
+    this.live.watch({
+      layoutId: id,
+      since: () => this.openDraft().revision,
+      onEdit: (edit) => this.hear(edit),
+    });
   }
 
   private move(patch: Patch): void {
@@ -330,6 +371,11 @@ export class LayoutStore implements OnDestroy {
     return { kind: 'again' };
   }
 
+  private hear(edit: RecordedEdit): void {
+    const met = withLive(this.openDraft(), edit);
+    if (met) this.meet(met);
+  }
+
   private meet(met: Met): void {
     const before = this.layout();
     this.draft.set(met.draft);
@@ -366,6 +412,11 @@ const FINAL_CODES: ReadonlySet<string> = new Set([
   'not-found',
   'too-large',
 ]);
+
+/** True when nothing changed that would have to be kept: moves of a gesture are not kept. */
+function sameUnsent(a: Draft | null, b: Draft | null): boolean {
+  return a?.revision === b?.revision && a?.inFlight === b?.inFlight && a?.waiting === b?.waiting;
+}
 
 function wireEdit(save: Save): Edit {
   const { baseRevision, key, patch } = save;
