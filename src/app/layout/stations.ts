@@ -1,8 +1,9 @@
+import type { Whereabouts } from '@shared/api/live';
 import type { CheckResult, CheckStation } from '@shared/checks/check';
 
 /** A place in the open layout, in the order of the work. */
 export interface Station {
-  readonly path: string;
+  readonly path: Whereabouts['station'];
   readonly name: string;
   /** Whose checks its lamp shows: its own, all of them, or none. */
   readonly lamp: CheckStation | 'all' | null;
