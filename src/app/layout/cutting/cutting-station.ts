@@ -39,9 +39,14 @@ export class CuttingStation {
   protected readonly store = inject(LayoutStore);
   private readonly application = inject(ApplicationRef);
 
-  protected readonly list = computed(() => cutList(this.store.layout()));
+  /** What can be cut: the pattern on the last document that held together. */
+  protected readonly layout = computed(() => {
+    const [sound, cells] = [this.store.soundLayout(), this.store.cells()];
+    return cells.length === sound.cells.length ? { ...sound, cells } : sound;
+  });
+  protected readonly list = computed(() => cutList(this.layout()));
   protected readonly groups = computed(() => {
-    const layout = this.store.layout();
+    const layout = this.layout();
     const unit = layout.lengthUnit;
     return woodGroups(this.list(), layout.woods).map((group) => ({
       ...group,
@@ -50,7 +55,7 @@ export class CuttingStation {
     }));
   });
   protected readonly summary = computed(() => {
-    const { lengthUnit, shell } = this.store.layout();
+    const { lengthUnit, shell } = this.layout();
     const { rows, tiles, spares, toCut } = this.list();
     const outlines = new Set(rows.map((row) => edgesKey(row.kind.edges))).size;
     const board = rows.reduce((sum, row) => sum + row.boardLength, 0);
@@ -68,7 +73,7 @@ export class CuttingStation {
   protected readonly reach = computed(() =>
     Math.max(
       ...this.list().rows.flatMap(({ kind }) => {
-        const { segments } = tileOutline(this.store.layout(), kind.edges);
+        const { segments } = tileOutline(this.layout(), kind.edges);
         const { minX, minY, maxX, maxY } = boundsOf(segments);
         return [-minX, -minY, maxX, maxY];
       }),

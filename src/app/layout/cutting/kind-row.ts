@@ -1,5 +1,6 @@
-import { Component, computed, inject, input, signal } from '@angular/core';
-import { tileRuns, runWords } from '@shared/layout/tile-runs';
+import { Component, computed, input, signal } from '@angular/core';
+import type { Layout } from '@shared/layout/schema';
+import { runWords, tileRuns } from '@shared/layout/tile-runs';
 import type { CutListRow } from '@shared/pieces/cut-list';
 import { edgeWords } from '@shared/pieces/edge-words';
 import { tileOutline } from '@shared/pieces/tile-outline';
@@ -7,7 +8,6 @@ import { formatLength, formatLengthFigure } from '@shared/units/format';
 import type { Millimetres } from '@shared/units/length';
 import { Icon } from '../../drawing/icon';
 import { PieceDrawing } from '../../drawing/piece-drawing';
-import { LayoutStore } from '../layout-store';
 import { formatBoardLength } from './board-length';
 
 /** One line of the cut list: a piece as it is drawn, how many, how large, and which tiles it fills. */
@@ -18,8 +18,7 @@ import { formatBoardLength } from './board-length';
   styleUrl: './kind-row.scss',
 })
 export class KindRow {
-  private readonly store = inject(LayoutStore);
-
+  readonly layout = input.required<Layout>();
   readonly row = input.required<CutListRow>();
   /** How far every drawing of the list looks from its piece's centre. */
   readonly reach = input.required<Millimetres>();
@@ -30,21 +29,19 @@ export class KindRow {
   protected readonly tilesShown = computed(
     () => this.medium() === 'paper' || this.opened() === 'open',
   );
-  protected readonly wood = computed(() => this.store.woods()[this.row().kind.wood]);
-  protected readonly outline = computed(() =>
-    tileOutline(this.store.layout(), this.row().kind.edges),
-  );
+  protected readonly wood = computed(() => this.layout().woods[this.row().kind.wood]);
+  protected readonly outline = computed(() => tileOutline(this.layout(), this.row().kind.edges));
   protected readonly edges = computed(() => edgeWords(this.row().kind.edges));
   protected readonly size = computed(() => {
     const { pieceLength, pieceWidth } = this.row();
-    const unit = this.store.lengthUnit();
+    const unit = this.layout().lengthUnit;
     return `${formatLengthFigure(pieceLength, unit)} × ${formatLength(pieceWidth, unit)}`;
   });
   protected readonly board = computed(() =>
-    formatBoardLength(this.row().boardLength, this.store.lengthUnit()),
+    formatBoardLength(this.row().boardLength, this.layout().lengthUnit),
   );
   protected readonly courses = computed(() =>
-    tileRuns(this.store.grid(), this.row().kind.positions).map(({ course, runs }) => ({
+    tileRuns(this.layout().shell, this.row().kind.positions).map(({ course, runs }) => ({
       course,
       staves: runWords(runs),
     })),
@@ -52,7 +49,7 @@ export class KindRow {
   /** How pieces of this kind go into the shell when they do not go in as drawn. */
   protected readonly turns = computed(() => {
     const { mirrored, faceDown, halfTurned } = this.row().kind;
-    const down = tileRuns(this.store.grid(), faceDown).map(({ course }) => course);
+    const down = tileRuns(this.layout().shell, faceDown).map(({ course }) => course);
     return [
       ...(mirrored ? ['Drawn as it lies on the machine, face down.'] : []),
       ...(down.length > 0
