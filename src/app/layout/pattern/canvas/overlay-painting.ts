@@ -98,8 +98,11 @@ function paintSeam(context: Context, frame: OverlayFrame, free: number): void {
 function paintTrim(context: Context, frame: OverlayFrame): number {
   const { view, size, colours, state } = frame;
   if (!state.trim) return size.width;
-  for (const height of [state.trim.bottom, state.trim.top]) {
-    const y = Math.round(toScreen(view, { x: 0, y: height }).y) + 0.5;
+  const heights = [state.trim.bottom, state.trim.top].map(
+    (height) => Math.round(toScreen(view, { x: 0, y: height }).y) + 0.5,
+  );
+  if (heights.every((y) => y < 0 || y > size.height)) return size.width;
+  for (const y of heights) {
     line(context, { x: 0, y }, { x: size.width, y }, 'rgb(255 253 249 / 70%)', { width: 2.6 });
     line(context, { x: 0, y }, { x: size.width, y }, '#b3261e', { width: 1.6, dash: [2, 4] });
   }
