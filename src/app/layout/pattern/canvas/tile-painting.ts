@@ -43,7 +43,7 @@ export interface PaintedTile {
 const RECTANGLES_UNDER_PX = 6;
 const GRAIN_FROM_PX = 14;
 const NUMBERS_FROM_PX = 18;
-const INK = 'rgb(30 42 54 / 88%)';
+const INK = 'rgb(18 23 30 / 92%)';
 
 /** Least side of a tile on the screen in CSS pixels. */
 export function tilePx(drawing: SheetDrawing, { pxPerMm, ratio }: Placement): number {
