@@ -1,5 +1,5 @@
 import { BreakpointObserver } from '@angular/cdk/layout';
-import { Component, computed, inject, signal, viewChild } from '@angular/core';
+import { Component, computed, DestroyRef, inject, signal, viewChild } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
@@ -89,6 +89,11 @@ export class PatternStation {
       `${formatLength(ring.acrossFlats, lengthUnit)} across the flats · bevel ${formatAngle(ring.bevel)}`
     );
   });
+
+  constructor() {
+    // Whoever leaves in the middle of a stroke keeps what it has laid.
+    inject(DestroyRef).onDestroy(() => this.end());
+  }
 
   protected begin(): void {
     this.gesture = this.store.begin(`Lay ${this.tool.woodName()}`);

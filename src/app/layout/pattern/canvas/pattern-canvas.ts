@@ -264,7 +264,7 @@ export class PatternCanvas implements OnDestroy {
 
   protected press(event: KeyboardEvent): void {
     const key = canvasKey(event);
-    if (key === null) return;
+    if (key === null || (this.strokeAt && key.kind !== 'stop')) return;
     if (key.kind === 'space' && this.cursor() === null) this.panReady.set(true);
     else if (!this.act(key)) return;
     event.preventDefault();
