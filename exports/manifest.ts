@@ -43,7 +43,7 @@ export interface ManifestContents {
 /** A figure as the manifest gives it. */
 interface ManifestMeasure {
   readonly value: number;
-  readonly unit: LengthUnit | 'degrees' | 'count';
+  readonly unit: LengthUnit | 'degrees' | 'count' | 'CIEDE2000';
 }
 
 interface ManifestPiece {
@@ -152,13 +152,16 @@ function lengthIn(length: Millimetres, unit: LengthUnit): number {
   return Number(fromMillimetres(length, unit).toFixed(6));
 }
 
+const MEASURE_UNITS = {
+  angle: 'degrees',
+  count: 'count',
+  'colour-difference': 'CIEDE2000',
+} as const;
+
 function measureIn(measure: Measure | null, unit: LengthUnit): ManifestMeasure | null {
   if (measure === null) return null;
   if (measure.kind === 'length') return { value: lengthIn(measure.value, unit), unit };
-  return {
-    value: Number(measure.value.toFixed(6)),
-    unit: measure.kind === 'angle' ? 'degrees' : 'count',
-  };
+  return { value: Number(measure.value.toFixed(6)), unit: MEASURE_UNITS[measure.kind] };
 }
 
 function sha256Of(text: string): string {

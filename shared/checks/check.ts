@@ -15,16 +15,17 @@ export const CHECK_KEYS = [
   'trim',
   'seam',
   'closing',
+  'contrast',
 ] as const;
 export type CheckKey = (typeof CHECK_KEYS)[number];
 
 /** The station where what a check finds is mended. */
-export type CheckStation = 'shell' | 'joint';
+export type CheckStation = 'shell' | 'joint' | 'pattern';
 
-/** A measured value: lengths in millimetres, angles in degrees, counts plain. */
+/** A measured value: lengths in millimetres, angles in degrees, counts plain, differences of colour in ΔE00. */
 export interface Measure {
   readonly value: number;
-  readonly kind: 'length' | 'angle' | 'count';
+  readonly kind: 'length' | 'angle' | 'count' | 'colour-difference';
 }
 
 /** What a check found, in sentences that carry figures in the reader's unit. */

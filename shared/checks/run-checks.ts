@@ -1,8 +1,9 @@
 import type { Layout } from '../layout/schema';
 import { board } from './board';
-import { CHECK_KEYS, type CheckKey, type CheckResult, type CheckSettings } from './check';
+import type { CheckKey, CheckResult, CheckSettings } from './check';
 import { closing } from './closing';
 import { checkContext, type Check } from './context';
+import { contrastOfLayout } from './contrast';
 import { flute } from './flute';
 import { insideRadius } from './inside-radius';
 import { neck } from './neck';
@@ -12,7 +13,8 @@ import { trim } from './trim';
 import { undercut } from './undercut';
 import { web } from './web';
 
-const CHECKS: Readonly<Record<CheckKey, Check>> = {
+/** In the order of `CHECK_KEYS`. */
+const SHAPE_CHECKS: Readonly<Record<Exclude<CheckKey, 'contrast'>, Check>> = {
   'inside-radius': insideRadius,
   'reach-in': reachIn,
   flute,
@@ -25,11 +27,16 @@ const CHECKS: Readonly<Record<CheckKey, Check>> = {
   closing,
 };
 
-/**
- * Every check of a layout that holds together, in the order of `CHECK_KEYS`. None of them looks at the
- * pattern, so laying tiles never changes a result.
- */
+/** Every check of a layout that holds together, in the order of `CHECK_KEYS`. */
 export function runChecks(layout: Layout, settings: CheckSettings = {}): CheckResult[] {
+  return [...runShapeChecks(layout, settings), contrastOfLayout(layout)];
+}
+
+/**
+ * The checks of shell, joint and cutter. None of them looks at the pattern, so laying tiles never changes a
+ * result.
+ */
+export function runShapeChecks(layout: Layout, settings: CheckSettings = {}): CheckResult[] {
   const context = checkContext(layout, settings);
-  return CHECK_KEYS.map((key) => CHECKS[key](context));
+  return Object.values(SHAPE_CHECKS).map((check) => check(context));
 }

@@ -10,7 +10,7 @@ import {
   squashPatches,
   type Patch,
 } from './patch';
-import { resizeChange } from './resize';
+import { resizeChange } from './carry';
 import { smallLayout } from './small-layout.fixture';
 
 const layout = smallLayout();

@@ -94,6 +94,18 @@ export function layChange(
   };
 }
 
+/** The change from one pattern to another of the same size, or null when they are the same. */
+export function relayChange(cells: Uint8Array, wished: Uint8Array): CellsChange | null {
+  const positions = [...cells.keys()].filter((p) => cells[p] !== wished[p]);
+  if (positions.length === 0) return null;
+  return {
+    kind: 'cells',
+    positions,
+    before: positions.map((p) => cells[p] ?? 0),
+    after: positions.map((p) => wished[p] ?? 0),
+  };
+}
+
 /** The value of a field. */
 export function readField<P extends FieldPath>(layout: Layout, path: P): LayoutFields[P] {
   const [group, name] = path.split('.') as [keyof Layout, string | undefined];
@@ -261,14 +273,7 @@ function gridChangeBetween(from: Layout, to: Layout): Change | null {
   if (before.staves !== after.staves || before.courses !== after.courses) {
     return { kind: 'resize', before, after };
   }
-  const positions = [...from.cells.keys()].filter((p) => from.cells[p] !== to.cells[p]);
-  if (positions.length === 0) return null;
-  return {
-    kind: 'cells',
-    positions,
-    before: positions.map((p) => from.cells[p] ?? 0),
-    after: positions.map((p) => to.cells[p] ?? 0),
-  };
+  return relayChange(from.cells, to.cells);
 }
 
 /** Size and pattern of a layout. */

@@ -2,7 +2,7 @@ import { expect, test } from 'vitest';
 import { cellAt } from './cells';
 import { applyPatch, fieldChange, layChange, type Change, type Patch } from './patch';
 import { rebase, restatePatch } from './rebase';
-import { resizeChange } from './resize';
+import { resizeChange } from './carry';
 import type { Layout } from './schema';
 import { smallLayout } from './small-layout.fixture';
 

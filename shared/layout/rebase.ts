@@ -4,6 +4,7 @@
  * both set is left as theirs and reported as a contest for the person to decide, everything else merges.
  * Where one side changed the size of the grid, tiles are followed by stave and course, not by position.
  */
+import { carryPattern } from './carry';
 import { cellAt, tileOf, type Grid } from './cells';
 import {
   applyPatch,
@@ -17,7 +18,6 @@ import {
   type Patch,
   type ResizeChange,
 } from './patch';
-import { resizedCells } from './resize';
 import type { Layout } from './schema';
 
 /** A field, or the size of the grid, that both set differently. */
@@ -146,7 +146,7 @@ class Walk {
   private resizedUnderTheirs(change: ResizeChange): ResizeChange {
     const cells = change.after.cells.slice();
     const follow = follower(this.now.shell, change.after);
-    const kept = resizedCells(change.before.cells, change.before, change.after);
+    const kept = carryPattern(change.before, change.after, 'keep').cells;
     const carried = new Set<number>();
     for (const from of this.theirTiles) {
       const position = follow(from);

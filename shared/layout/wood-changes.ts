@@ -1,5 +1,5 @@
 /** The woods of a layout changed: each answer is the changes of one edit, to be applied together in order. */
-import { fieldChange, type CellsChange, type Change } from './patch';
+import { fieldChange, relayChange, type Change } from './patch';
 import { BOUNDS, type Layout, type Wood } from './schema';
 
 /** What a person says of a wood; its key follows from the name. */
@@ -34,14 +34,8 @@ export function removeWood(layout: Layout, index: number, heir: number): Change[
     return kept > index ? kept - 1 : kept;
   };
   const woods = layout.woods.filter((_, i) => i !== index);
-  return present(relabelled(layout.cells, after), fieldChange(layout, 'woods', woods));
-}
-
-function relabelled(cells: Uint8Array, after: (wood: number) => number): CellsChange | null {
-  const positions = [...cells.keys()].filter((p) => after(cells[p] ?? 0) !== cells[p]);
-  if (positions.length === 0) return null;
-  const before = positions.map((p) => cells[p] ?? 0);
-  return { kind: 'cells', positions, before, after: before.map(after) };
+  const relaid = relayChange(layout.cells, layout.cells.map(after));
+  return present(relaid, fieldChange(layout, 'woods', woods));
 }
 
 /** A key from a name: its letters and digits, with a number when taken. */

@@ -12,7 +12,7 @@ import {
   type Change,
   type Patch,
 } from '@shared/layout/patch';
-import { resizeChange } from '@shared/layout/resize';
+import { resizeChange } from '@shared/layout/carry';
 import type { Layout } from '@shared/layout/schema';
 import { smallLayout } from '@shared/layout/small-layout.fixture';
 import { FIXED_SEED } from './fixed-seed';

@@ -15,7 +15,7 @@ import {
   type Patch,
 } from '@shared/layout/patch';
 import type { Contest } from '@shared/layout/rebase';
-import { resizeChange } from '@shared/layout/resize';
+import { resizeChange } from '@shared/layout/carry';
 import type { Layout } from '@shared/layout/schema';
 import { smallLayout } from '@shared/layout/small-layout.fixture';
 import {

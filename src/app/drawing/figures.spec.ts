@@ -20,7 +20,7 @@ describe('figures in a sentence', () => {
       '5.625°',
       '8 %',
       '16 staves',
-      '7.4',
+      'ΔE 7.4',
     ]);
   });
 

@@ -7,7 +7,7 @@ export interface SentencePart {
 const UNITS =
   'mm ⌀|mm|in|°|%|staves|stave|tiles|tile|courses|course|halves|boards|pieces|kinds|blanks|spares|spare|h|min|minutes|times';
 const FIGURE = new RegExp(
-  String.raw`(?<![\w.])[−-]?\d+(?:[ \u00a0\u202f]\d{3})*(?:\.\d+)?(?:[ \u00a0]?(?:${UNITS})(?![\w]))?(?![\w])`,
+  String.raw`(?<![\w.])(?:ΔE )?[−-]?\d+(?:[ \u00a0\u202f]\d{3})*(?:\.\d+)?(?:[ \u00a0]?(?:${UNITS})(?![\w]))?(?![\w])`,
   'g',
 );
 

@@ -5,7 +5,7 @@ import { MatDialog } from '@angular/material/dialog';
 import { NavigationEnd, Router, RouterOutlet } from '@angular/router';
 import { fieldChange } from '@shared/layout/patch';
 import type { Contest } from '@shared/layout/rebase';
-import { resizeChange } from '@shared/layout/resize';
+import { resizeChange } from '@shared/layout/carry';
 import { filter, firstValueFrom, map, startWith } from 'rxjs';
 import { Trouble } from '../drawing/trouble';
 import { BarActions } from '../platform/bar-actions';

@@ -13,7 +13,7 @@ import {
   type FieldPath,
   type LayoutFields,
 } from '@shared/layout/patch';
-import { resizeChange } from '@shared/layout/resize';
+import { resizeChange } from '@shared/layout/carry';
 import type { Layout, Problem } from '@shared/layout/schema';
 import { madeChanges } from './draft';
 import type { LayoutStore } from './layout-store';

@@ -3,7 +3,7 @@ import { TestBed } from '@angular/core/testing';
 import type { Edit, EditSaved, OpenLayout } from '@shared/api/layout';
 import { fieldChange, layChange } from '@shared/layout/patch';
 import { layoutFileOf } from '@shared/layout/read-layout';
-import { resizeChange } from '@shared/layout/resize';
+import { resizeChange } from '@shared/layout/carry';
 import type { Layout } from '@shared/layout/schema';
 import { startingLayout } from '@shared/layout/starting-layout';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';

@@ -22,10 +22,19 @@ import {
 } from '@shared/api/layout';
 import type { VersionKept } from '@shared/api/version';
 import { wirePatchOf } from '@shared/api/wire-patch';
-import { runChecks } from '@shared/checks/run-checks';
+import { contrast } from '@shared/checks/contrast';
+import { runShapeChecks } from '@shared/checks/run-checks';
 import type { Grid } from '@shared/layout/cells';
 import { problemsOf } from '@shared/layout/consistency';
-import { invertPatch, patchBetween, resizes, type Change, type Patch } from '@shared/layout/patch';
+import { woodsSideBySide } from '@shared/layout/neighbours';
+import {
+  invertPatch,
+  patchBetween,
+  resizes,
+  sameValue,
+  type Change,
+  type Patch,
+} from '@shared/layout/patch';
 import { readLayout } from '@shared/layout/read-layout';
 import { restatePatch, type Contest } from '@shared/layout/rebase';
 import type { Layout, Wood } from '@shared/layout/schema';
@@ -125,7 +134,15 @@ export class LayoutStore implements OnDestroy {
     computation: (layout, previous) =>
       previous && problemsOf(layout).length > 0 ? previous.value : layout,
   });
-  readonly checks = computed(() => runChecks(this.soundLayout()));
+  private readonly shapeChecks = computed(() => runShapeChecks(this.soundLayout()));
+  /** Asked for at every touch, and the same as long as no other woods meet: so no check runs again. */
+  private readonly neighbours = computed(() => woodsSideBySide(this.grid(), this.cells()), {
+    equal: sameValue,
+  });
+  readonly checks = computed(() => [
+    ...this.shapeChecks(),
+    contrast(this.woods(), this.neighbours()),
+  ]);
   /** The revision the server has. */
   readonly revision = computed(() => this.openDraft().revision);
   readonly saving: Signal<SaveState> = this.queue.state;

@@ -12,7 +12,7 @@ export interface Station {
 export const STATIONS: readonly Station[] = [
   { path: 'shell', name: 'Shell', lamp: 'shell' },
   { path: 'joint', name: 'Joint', lamp: 'joint' },
-  { path: 'pattern', name: 'Pattern', lamp: null },
+  { path: 'pattern', name: 'Pattern', lamp: 'pattern' },
   { path: 'cutting', name: 'Cutting', lamp: 'all' },
   { path: 'review', name: 'Review', lamp: null },
 ];

@@ -1,4 +1,4 @@
-import { runChecks } from '@shared/checks/run-checks';
+import { runShapeChecks } from '@shared/checks/run-checks';
 import { gapsWithTaper } from '@shared/joint/taper';
 import type { Layout } from '@shared/layout/schema';
 import { layoutFit } from '@shared/pieces/layout-fit';
@@ -9,7 +9,7 @@ import { findingOf, type Finding } from '../findings';
 
 /** What is true of these joints, in sentences: the radii first, then the checks of the joint. */
 export function jointFindings(layout: Layout, lengthUnit: LengthUnit): Finding[] {
-  const checks = runChecks(layout, { lengthUnit }).filter((check) => check.station === 'joint');
+  const checks = runShapeChecks(layout, { lengthUnit }).filter((check) => check.station === 'joint');
   const radii: Finding = { state: 'clear', text: radiiText(layout, lengthUnit) };
   return [radii, ...checks.map(findingOf)];
 }

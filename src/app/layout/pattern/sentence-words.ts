@@ -2,6 +2,8 @@
 import type { Extent } from '@shared/layout/extent';
 import type { Mirror } from '@shared/layout/repeats';
 
+export { inSentence } from '@shared/layout/wood-name';
+
 export const EXTENT_WORDS: Record<Extent, string> = {
   tile: 'one tile',
   course: 'a course',
@@ -39,9 +41,4 @@ export function tilesWords(count: number): string {
 export function counted(count: number, noun: string): string {
   const figure = count.toLocaleString('en').replaceAll(',', '\u202f');
   return `${figure} ${noun}${count === 1 ? '' : 's'}`;
-}
-
-/** A wood's name inside a sentence: "Black walnut" → "black walnut"; "MDF" stays. */
-export function inSentence(name: string): string {
-  return /^\p{Lu}\p{Ll}/u.test(name) ? name.charAt(0).toLowerCase() + name.slice(1) : name;
 }

@@ -1,4 +1,4 @@
-import { runChecks } from '@shared/checks/run-checks';
+import { runShapeChecks } from '@shared/checks/run-checks';
 import type { Layout } from '@shared/layout/schema';
 import { ringOf } from '@shared/shell/ring';
 import { formatAngle, formatLength } from '@shared/units/format';
@@ -10,7 +10,7 @@ export function shellFindings(layout: Layout, lengthUnit: LengthUnit): Finding[]
   const { shell } = layout;
   const ring = ringOf(shell, layout.joint.staveJoint.reach);
   const length = (value: number) => formatLength(value, lengthUnit);
-  const checks = runChecks(layout, { lengthUnit }).filter((check) => check.station === 'shell');
+  const checks = runShapeChecks(layout, { lengthUnit }).filter((check) => check.station === 'shell');
   const bevel: Finding = {
     state: 'clear',
     text: `Each edge is bevelled ${formatAngle(ring.bevel)}; a joint turns ${formatAngle(ring.jointTurn)}.`,

@@ -3,7 +3,7 @@ import { MatButton } from '@angular/material/button';
 import { MAT_DIALOG_DATA, MatDialogModule, MatDialogRef } from '@angular/material/dialog';
 import { applyPatch, fieldChange } from '@shared/layout/patch';
 import { problemsOf } from '@shared/layout/consistency';
-import { resizeChange } from '@shared/layout/resize';
+import { resizeChange } from '@shared/layout/carry';
 import { BOUNDS } from '@shared/layout/schema';
 import {
   ringsOfStaves,

@@ -1,7 +1,5 @@
 import { Component, computed, effect, inject, input, output, signal } from '@angular/core';
-import { runChecks } from '@shared/checks/run-checks';
 import { cellAt } from '@shared/layout/cells';
-import type { Layout } from '@shared/layout/schema';
 import { FigureText } from '../../../drawing/figure-text';
 import { LayoutStore } from '../../layout-store';
 import type { ViewSpan } from '../canvas/view-span';
@@ -54,9 +52,7 @@ export class PatternSide {
     });
   });
 
-  /** The layout as far as checks look at it: laying a tile asks for none of them again. */
-  private readonly checked = computed(() => this.store.layout(), { equal: sameForChecks });
-  protected readonly checks = computed(() => runChecks(this.checked()));
+  protected readonly checks = this.store.checks;
 
   private readonly counted = signal(this.store.layout());
   protected readonly toCut = computed(() => toCutSentence(this.counted()));
@@ -68,14 +64,4 @@ export class PatternSide {
       onCleanup(() => clearTimeout(rest));
     });
   }
-}
-
-function sameForChecks(a: Layout, b: Layout): boolean {
-  return (
-    a.shell === b.shell &&
-    a.joint === b.joint &&
-    a.cutter === b.cutter &&
-    a.build === b.build &&
-    a.lengthUnit === b.lengthUnit
-  );
 }
