@@ -44,13 +44,13 @@ test('the files are what the schema allows, and a good part of them is accepted'
         expect(message).not.toMatch(/NaN|Infinity|-\d/);
       }
     }),
-    { ...FIXED_SEED, numRuns: 1500 },
+    { ...FIXED_SEED, numRuns: 800 },
   );
-  expect(forAccepted(1500, () => undefined)).toBeGreaterThan(300);
+  expect(forAccepted(800, () => undefined)).toBeGreaterThan(200);
 });
 
 test('outlines are closed, counter-clockwise, and cross themselves only where the web check stops', () => {
-  forAccepted(1500, (layout) => {
+  forAccepted(900, (layout) => {
     const stopped = fallsApart(layout);
     for (const { outline } of layoutOutlines(layout)) {
       expect(openings(outline.segments)).toBeLessThanOrEqual(1e-6);
@@ -115,7 +115,7 @@ test('a cutter that fits an outline leaves room for every smaller one', () => {
 });
 
 test('checks never throw, print plain figures, and have a remedy exactly when not clear', () => {
-  forAccepted(1500, (layout) => {
+  forAccepted(900, (layout) => {
     for (const lengthUnit of ['mm', 'in'] as const) {
       for (const check of runChecks(layout, { lengthUnit })) {
         const { finding, reason, remedy, figure, limit } = check;
