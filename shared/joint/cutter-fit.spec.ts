@@ -13,6 +13,21 @@ describe('a square with a semicircular notch of radius 3', () => {
   });
 });
 
+it('the largest cutter is rounded down to 0.001 mm, never up', () => {
+  // found by a random layout whose tip radius allows 0.015948 mm
+  const pinched = {
+    segments: [
+      line(-1, -1, 1, -1),
+      line(1, -1, 1, 1),
+      line(1, 1, 0.007974, 1),
+      arc(0, 1, 0.007974, 0, -180),
+      line(-0.007974, 1, -1, 1),
+      line(-1, 1, -1, -1),
+    ],
+  };
+  expect(cutterFit(pinched, 1).largestCutter).toBeCloseTo(0.015, 12);
+});
+
 it('an outline without inside corners takes any cutter', () => {
   for (const outline of [square, roundedRectangle]) {
     expect(tightestInside(outline)).toBeNull();

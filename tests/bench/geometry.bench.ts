@@ -9,7 +9,6 @@ import { notchedSquare } from '@shared/geometry/shapes.fixture';
 import { runChecks } from '@shared/checks/run-checks';
 import type { Layout } from '@shared/layout/schema';
 import { printLayout, readLayoutText } from '@shared/layout/read-layout';
-import { layoutOutlines } from '@shared/pieces/layout-fit';
 import { pieceKinds } from '@shared/pieces/piece-kinds';
 import { tileOutline } from '@shared/pieces/tile-outline';
 import { chordsOf } from '../reference/true-arcs';
@@ -63,7 +62,7 @@ function sizeRow(what: string, run: (layout: Layout) => unknown, batch: number):
 }
 
 function offsetRow(): BenchRow {
-  const [{ outline }] = layoutOutlines(checkerLayout(40, 8)).slice(-1) as [{ outline: Outline }];
+  const outline = outlinesOf(checkerLayout(40, 8)).at(-1) as Outline;
   const path = [chordsOf(outline.segments, CHORD)];
   const [ours, baseline] = timed([() => exactOffset(outline), () => clipperOffset(path)], 20);
   return {
