@@ -14,6 +14,13 @@ export function initialsOf(name: string): string {
   return ((letters[0] ?? '') + last).toUpperCase();
 }
 
+/** The colour a person has everywhere. */
+export function groundOf(name: string): string {
+  let sum = 0;
+  for (const letter of name) sum = (sum * 31 + (letter.codePointAt(0) ?? 0)) % 9973;
+  return GROUNDS[sum % GROUNDS.length] ?? GROUNDS[0];
+}
+
 /** A person as a disc with initials, always in the same colour. */
 @Component({
   selector: 'sl-avatar',
@@ -36,9 +43,5 @@ export function initialsOf(name: string): string {
 export class Avatar {
   readonly name = input.required<string>();
   protected readonly initials = computed(() => initialsOf(this.name()));
-  protected readonly ground = computed(() => {
-    let sum = 0;
-    for (const letter of this.name()) sum = (sum * 31 + (letter.codePointAt(0) ?? 0)) % 9973;
-    return GROUNDS[sum % GROUNDS.length];
-  });
+  protected readonly ground = computed(() => groundOf(this.name()));
 }

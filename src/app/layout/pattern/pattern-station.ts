@@ -1,21 +1,34 @@
 import { BreakpointObserver } from '@angular/cdk/layout';
-import { Component, computed, DestroyRef, inject, signal, viewChild } from '@angular/core';
+import {
+  Component,
+  computed,
+  DestroyRef,
+  effect,
+  inject,
+  signal,
+  untracked,
+  viewChild,
+} from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
-import { countWoods } from '@shared/layout/cells';
+import { countWoods, roundStave, type Grid } from '@shared/layout/cells';
 import type { Tile } from '@shared/layout/extent';
 import { layChange } from '@shared/layout/patch';
 import { addWood, editWood, removeWood, type WoodWords } from '@shared/layout/wood-changes';
 import { ringOf } from '@shared/shell/ring';
 import { formatAngle, formatLength } from '@shared/units/format';
 import { map } from 'rxjs';
+import { groundOf, initialsOf } from '../../drawing/avatar';
 import { Icon } from '../../drawing/icon';
 import { Announcer } from '../../platform/announcer';
 import { LayoutStore, type Gesture } from '../layout-store';
+import { LiveEvents } from '../live-events';
+import type { PersonMark } from './canvas/overlay-painting';
 import { PatternCanvas } from './canvas/pattern-canvas';
 import type { ViewSpan } from './canvas/view-span';
 import { PatternTool } from './pattern-tool';
+import { RoundPanel } from './round/round-panel';
 import { SentenceBar } from './sentence-bar/sentence-bar';
 import { inSentence } from './sentence-words';
 import { PatternSide } from './side/pattern-side';
@@ -30,7 +43,7 @@ const LAYING_FROM = '(min-width: 768px)';
 /** The pattern: the unrolled shell, the sentence that says what a touch does, the woods, and what it comes to. */
 @Component({
   selector: 'sl-pattern-station',
-  imports: [Icon, MatButton, PatternCanvas, PatternSide, SentenceBar, WoodTray],
+  imports: [Icon, MatButton, PatternCanvas, PatternSide, RoundPanel, SentenceBar, WoodTray],
   providers: [PatternTool],
   templateUrl: './pattern-station.html',
   styleUrl: './pattern-station.scss',
@@ -51,6 +64,14 @@ export class PatternStation {
     { initialValue: true },
   );
   protected readonly numbers = signal<'shown' | 'hidden'>('hidden');
+  protected readonly round = signal<'shown' | 'hidden'>('hidden');
+  /** Where others are on the pattern. */
+  protected readonly others = computed<readonly PersonMark[]>(() =>
+    this.store.people().flatMap(({ tile, person: { name } }) => {
+      if (!tile || !isOnGrid(this.store.grid(), tile)) return [];
+      return [{ tile, initials: initialsOf(name), colour: groundOf(name) }];
+    }),
+  );
   protected readonly span = signal<ViewSpan | null>(null);
   private readonly pointedAt = signal<Tile | null>(null);
   private readonly standsOn = signal<Tile | null>(null);
@@ -93,6 +114,12 @@ export class PatternStation {
   constructor() {
     // Whoever leaves in the middle of a stroke keeps what it has laid.
     inject(DestroyRef).onDestroy(() => this.end());
+    const live = inject(LiveEvents);
+    effect(() => {
+      const tile = this.standsOn() ?? this.pointedAt();
+      const stave = tile && roundStave(this.store.grid(), tile.stave);
+      untracked(() => live.moveTo({ tile: tile && { stave: stave ?? 0, course: tile.course } }));
+    });
   }
 
   protected begin(): void {
@@ -209,4 +236,9 @@ function isEntry(target: EventTarget | null): boolean {
     target instanceof HTMLTextAreaElement ||
     (target instanceof HTMLElement && target.closest('[role="menu"]') !== null)
   );
+}
+
+/** Somebody may still point at a tile that a smaller grid no longer has. */
+function isOnGrid(grid: Grid, tile: Tile): boolean {
+  return tile.stave < grid.staves && tile.course < grid.courses;
 }

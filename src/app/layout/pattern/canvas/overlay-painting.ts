@@ -22,6 +22,13 @@ export interface TrimLines {
   readonly words: string;
 }
 
+/** Where somebody else is on the pattern. */
+export interface PersonMark {
+  readonly tile: Tile;
+  readonly initials: string;
+  readonly colour: string;
+}
+
 export interface OverlayState {
   /** Positions the next touch will change. */
   readonly preview: readonly number[];
@@ -29,6 +36,7 @@ export interface OverlayState {
   readonly cursor: Tile | null;
   /** Tiles somebody else laid too, mine on top. */
   readonly overlaid: ReadonlySet<number>;
+  readonly people: readonly PersonMark[];
   readonly trim: TrimLines | null;
 }
 
@@ -53,6 +61,7 @@ export function paintOverlay(context: Context, frame: OverlayFrame): void {
   paintSeam(context, frame, free);
   paintStaveNumbers(context, frame);
   paintCourseLetters(context, frame);
+  paintInitials(context, frame);
 }
 
 /** Top and bottom of the sheet on the screen. */
@@ -215,11 +224,36 @@ function marksOf({ drawing, colours, state }: OverlayFrame): TileMark[] {
     ? [{ tile: state.cursor, colour: colours.ink, width: 5, fill: 0 }]
     : [];
   return [
+    ...state.people.map(({ tile, colour }) => ({ tile, colour, width: 2.5, fill: 0.12 })),
     ...[...state.overlaid].map(mark('#b26a00', 2.5, 0)),
     ...state.preview.map(mark(colours.teal, 2.5, 0.28)),
     ...cursor,
     ...cursor.map((mine) => ({ ...mine, colour: colours.teal, width: 3 })),
   ];
+}
+
+const INITIALS_FONT = '800 10px Nunito, sans-serif';
+const DISC_PX = 9;
+
+/** A disc with initials at the corner of every tile somebody else is on. */
+function paintInitials(context: Context, frame: OverlayFrame): void {
+  const { drawing, view, size, state } = frame;
+  context.font = INITIALS_FONT;
+  context.textAlign = 'center';
+  context.textBaseline = 'middle';
+  for (const turn of turnsInView(view, size, drawing.size)) {
+    for (const { tile, initials, colour } of state.people) {
+      const x = turn * drawing.size.circumference + (tile.stave + 1) * drawing.tileWidth;
+      const corner = toScreen(view, { x, y: (tile.course + 1) * drawing.tileHeight });
+      if (!nearWindow(frame, corner)) continue;
+      context.fillStyle = colour;
+      context.beginPath();
+      context.arc(corner.x, corner.y, DISC_PX, 0, 2 * Math.PI);
+      context.fill();
+      context.fillStyle = '#ffffff';
+      context.fillText(initials, corner.x, corner.y + 0.5);
+    }
+  }
 }
 
 function strokeMark(

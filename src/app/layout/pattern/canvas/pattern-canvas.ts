@@ -20,7 +20,7 @@ import { formatLength } from '@shared/units/format';
 import type { PointMm } from '@shared/units/length';
 import { Theme } from '../../../platform/theme';
 import { canvasKey, type CanvasKey } from './canvas-keys';
-import type { TrimLines } from './overlay-painting';
+import type { PersonMark, TrimLines } from './overlay-painting';
 import { PatternStage } from './pattern-stage';
 import { PointerInput, type PointerMeaning } from './pointer-input';
 import { differing, SceneBook } from './scene';
@@ -65,6 +65,8 @@ export class PatternCanvas implements OnDestroy {
   /** Positions the next touch will change. */
   readonly preview = input<readonly number[]>([]);
   readonly overlaid = input<ReadonlySet<number>>(new Set());
+  /** Where others are. */
+  readonly people = input<readonly PersonMark[]>([]);
 
   readonly strokeBegan = output();
   /** Tiles the stroke has met since the last time; staves may lie beyond the seam. */
@@ -115,6 +117,7 @@ export class PatternCanvas implements OnDestroy {
         preview: this.preview(),
         cursor: this.cursor(),
         overlaid: this.overlaid(),
+        people: this.people(),
         trim: this.trim(),
       });
     });

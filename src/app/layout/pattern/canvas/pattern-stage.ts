@@ -48,6 +48,7 @@ export class PatternStage {
     preview: [],
     cursor: null,
     overlaid: new Set(),
+    people: [],
     trim: null,
   };
 
