@@ -10,7 +10,9 @@ export function shellFindings(layout: Layout, lengthUnit: LengthUnit): Finding[]
   const { shell } = layout;
   const ring = ringOf(shell, layout.joint.staveJoint.reach);
   const length = (value: number) => formatLength(value, lengthUnit);
-  const checks = runShapeChecks(layout, { lengthUnit }).filter((check) => check.station === 'shell');
+  const checks = runShapeChecks(layout, { lengthUnit }).filter(
+    (check) => check.station === 'shell',
+  );
   const bevel: Finding = {
     state: 'clear',
     text: `Each edge is bevelled ${formatAngle(ring.bevel)}; a joint turns ${formatAngle(ring.jointTurn)}.`,

@@ -37,6 +37,20 @@ const LENGTH_BOUNDS: Readonly<Record<ShellLength, { least: number; most: number 
   skimAllowance: BOUNDS.skimAllowance,
 };
 
+/** Fields that belong together stand side by side. */
+const ROWS: readonly { readonly names: readonly ShellLength[]; readonly hint?: string }[] = [
+  { names: ['tileWidth', 'tileHeight'], hint: 'width across the outer face of the flat stave' },
+  { names: ['finishedOuterDiameter'] },
+  { names: ['finishedInnerDiameter'] },
+  { names: ['finishedHeight'] },
+  { names: ['boardThickness', 'skimAllowance'] },
+];
+
+const MEASURES: Readonly<Partial<Record<ShellLength, string>>> = {
+  finishedOuterDiameter: '⌀',
+  finishedInnerDiameter: '⌀',
+};
+
 /** Sizes of the shell, with the ring, one stave and the heights drawn as they are typed. */
 @Component({
   selector: 'sl-shell-station',
@@ -54,16 +68,10 @@ export class ShellStation {
   protected readonly unit = this.store.lengthUnit;
   protected readonly access = computed(() => (this.store.rights.editPattern() ? 'open' : 'locked'));
 
-  /** What each length field shows, and what is wrong with it. */
-  protected readonly fields = computed(() => ({
-    tileWidth: this.field('tileWidth'),
-    tileHeight: this.field('tileHeight'),
-    finishedOuterDiameter: this.field('finishedOuterDiameter'),
-    finishedInnerDiameter: this.field('finishedInnerDiameter'),
-    finishedHeight: this.field('finishedHeight'),
-    boardThickness: this.field('boardThickness'),
-    skimAllowance: this.field('skimAllowance'),
-  }));
+  /** The length fields as they stand under each other: what each shows, and what is wrong with it. */
+  protected readonly rows = computed(() =>
+    ROWS.map(({ names, hint }) => ({ fields: names.map((name) => this.field(name)), hint })),
+  );
   protected readonly typed = computed(() => this.proposal.candidate().shell);
   private readonly drawn = this.proposal.drawn;
   protected readonly findings = computed(() => shellFindings(this.drawn(), this.unit()));
@@ -112,8 +120,10 @@ export class ShellStation {
   private field(name: ShellLength) {
     const path = `shell.${name}` as const;
     return {
+      name,
       label: fieldName(path),
       value: this.typed()[name],
+      measure: MEASURES[name] ?? '',
       ...LENGTH_BOUNDS[name],
       problem: this.proposal.problemOf(path),
     };
