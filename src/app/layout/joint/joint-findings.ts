@@ -9,7 +9,9 @@ import { findingOf, type Finding } from '../findings';
 
 /** What is true of these joints, in sentences: the radii first, then the checks of the joint. */
 export function jointFindings(layout: Layout, lengthUnit: LengthUnit): Finding[] {
-  const checks = runShapeChecks(layout, { lengthUnit }).filter((check) => check.station === 'joint');
+  const checks = runShapeChecks(layout, { lengthUnit }).filter(
+    (check) => check.station === 'joint',
+  );
   const radii: Finding = { state: 'clear', text: radiiText(layout, lengthUnit) };
   return [radii, ...checks.map(findingOf)];
 }
