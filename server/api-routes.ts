@@ -9,6 +9,7 @@ import {
 } from '@shared/api/commission';
 import { editSavedSchema, editSchema, openLayoutSchema } from '@shared/api/layout';
 import { liveQuerySchema, whereaboutsSchema } from '@shared/api/live';
+import { PICTURE_BOUNDS, PICTURE_FIELD } from '@shared/api/picture';
 import { sessionSchema, signInSchema } from '@shared/api/session';
 import {
   keepVersionSchema,
@@ -128,6 +129,16 @@ export const API_ROUTES = {
     body: whereaboutsSchema,
     answer: { status: 204 },
     refusals: [],
+  },
+  preparePicture: {
+    method: 'post',
+    path: '/pictures/prepared',
+    summary:
+      'A PNG, JPEG or WebP picture made ready to be laid as tiles: upright, without metadata, at most 1024 px a side, as PNG; nothing of it is kept',
+    access: { anyOf: ['edit-pattern'] },
+    upload: { field: PICTURE_FIELD, most: PICTURE_BOUNDS.bytes },
+    answer: { status: 200, file: 'image/png' },
+    refusals: ['too-many-requests'],
   },
   listVersions: {
     method: 'get',

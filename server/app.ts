@@ -21,6 +21,7 @@ import { securityHeaders } from './http/security-headers';
 import { sessions } from './http/session';
 import { appStatics } from './http/statics';
 import { mountLayouts } from './layouts/layouts-router';
+import { mountPictures } from './pictures/pictures-router';
 import { mountVersions } from './versions/versions-router';
 
 export interface AppDependencies {
@@ -70,6 +71,7 @@ function api({ config, open, logger, live }: AppDependencies): Router {
   mountCommissions(mount, open.database);
   mountLayouts(mount, open.database);
   mountEvents(mount, { database: open.database, live, logger });
+  mountPictures(mount);
   mountVersions(mount, open.database);
   mountBundles(mount, open.database);
   router.use(noSuchRoute);

@@ -23,7 +23,7 @@ export function mountSession(
       await beginSession(request, person);
       return { person };
     },
-    signInLimits,
+    { afterBody: signInLimits },
   );
 
   mount(API_ROUTES.signOut, async ({ request }) => {

@@ -55,11 +55,24 @@ function operation(name: string, route: RouteDeclaration): Json {
     ...(rights && { description: `Takes the right ${rights.join(' or ')}.` }),
     security: rights ? [{ session: [] }] : [],
     parameters: parametersOf(route),
-    ...(route.body && {
-      requestBody: { required: true, content: jsonContent(jsonSchema(route.body, 'input')) },
-    }),
+    ...requestBodyOf(route),
     responses: { ...answerOf(route.answer), ...refusalsOf(route) },
   };
+}
+
+function requestBodyOf({ body, upload }: RouteDeclaration): Json {
+  if (body) {
+    return { requestBody: { required: true, content: jsonContent(jsonSchema(body, 'input')) } };
+  }
+  if (!upload) return {};
+  const { field, most } = upload;
+  const file = {
+    type: 'string',
+    contentMediaType: 'application/octet-stream',
+    description: `At most ${most} bytes.`,
+  };
+  const schema = { type: 'object', properties: { [field]: file }, required: [field] };
+  return { requestBody: { required: true, content: { 'multipart/form-data': { schema } } } };
 }
 
 function parametersOf(route: RouteDeclaration): Json[] {
@@ -107,7 +120,7 @@ function refusalsOf(route: RouteDeclaration): Json {
   const codes = new Set<ApiProblemCode>([
     ...(route.access === 'anyone' ? [] : (['not-signed-in', 'not-allowed'] as const)),
     ...(route.method === 'get' ? [] : (['forged-request'] as const)),
-    ...(route.body ? (['bad-input', 'too-large'] as const) : []),
+    ...(route.body || route.upload ? (['bad-input', 'too-large'] as const) : []),
     ...(route.query ? (['bad-input'] as const) : []),
     ...(route.path.includes(':') ? (['not-found'] as const) : []),
     ...route.refusals,

@@ -10,6 +10,7 @@ import express, { type Request, type RequestHandler, type Response, type Router 
 import * as z from 'zod';
 import type { CsrfGuard } from './csrf';
 import { ApiError, badInput, notFound } from './errors';
+import { uploadBody, type UploadDeclaration } from './upload';
 import { validated } from './validate';
 
 /** Who may call a route: anyone, or people signed in with at least one of the rights. */
@@ -18,7 +19,7 @@ export type Access = 'anyone' | { readonly anyOf: readonly Right[] };
 /** What a route answers when all goes well. */
 export type RouteAnswer =
   | { readonly status: 200 | 201; readonly schema: z.ZodType }
-  | { readonly status: 200; readonly file: 'application/json' | 'application/zip' }
+  | { readonly status: 200; readonly file: 'application/json' | 'application/zip' | 'image/png' }
   | { readonly status: 200; readonly stream: 'text/event-stream' }
   | { readonly status: 204 };
 
@@ -32,6 +33,8 @@ export interface RouteDeclaration {
   readonly body?: z.ZodType;
   /** "layout" where a body may hold a whole layout or a long edit. */
   readonly bodyLimit?: 'layout';
+  /** Instead of a body in JSON: one file. */
+  readonly upload?: UploadDeclaration;
   readonly answer: RouteAnswer;
   /** Refusals of this route's own; those every such route shares follow from the rest. */
   readonly refusals: readonly ApiProblemCode[];
@@ -63,6 +66,7 @@ export interface RouteCall<R extends RouteDeclaration> {
   readonly params: ParamsOf<R['path']>;
   readonly query: OutputOf<R['query']>;
   readonly body: OutputOf<R['body']>;
+  readonly upload: R extends { upload: UploadDeclaration } ? Uint8Array : undefined;
   readonly request: Request;
 }
 
@@ -80,29 +84,33 @@ export type RouteHandler<R extends RouteDeclaration> = (
   call: RouteCall<R>,
 ) => Promise<AnswerOf<R>> | AnswerOf<R>;
 
+/** What a route has done besides its checks. */
+export interface RouteSteps {
+  readonly beforeBody?: readonly RequestHandler[];
+  readonly afterBody?: readonly RequestHandler[];
+}
+
 /** Puts handlers behind the checks their declarations ask for. */
 export interface RouteMount {
-  <const R extends RouteDeclaration>(
-    route: R,
-    handler: RouteHandler<R>,
-    before?: readonly RequestHandler[],
-  ): void;
+  <const R extends RouteDeclaration>(route: R, handler: RouteHandler<R>, steps?: RouteSteps): void;
 }
 
 /**
- * A mount on this router. In order: signed in (401), token (403), right (403), size and shape of the body
- * (413, 400), path (404), query (400); then what runs `before`, then the handler.
+ * A mount on this router. In order: signed in (401), token (403), right (403), steps `beforeBody`, size and
+ * shape of the body (413, 400), steps `afterBody`, path (404), query (400), the handler.
  */
 export function mountOn(router: Router, csrf: CsrfGuard): RouteMount {
-  return (route, handler, before = []) => {
+  return (route, handler, { beforeBody = [], afterBody = [] } = {}) => {
     router[route.method](
       route.path,
       (request, _response, next) => {
         demandAccess(route, request, csrf);
         next();
       },
+      ...beforeBody,
       ...(route.body ? [jsonBody(route)] : []),
-      ...before,
+      ...(route.upload ? [uploadBody(route.upload)] : []),
+      ...afterBody,
       async (request, response) => {
         const answer = await handler(callOf(route, request));
         csrf.hand(request, response);
@@ -143,6 +151,7 @@ function callOf<R extends RouteDeclaration>(route: R, request: Request): RouteCa
     params,
     query: route.query && validated(route.query, request.query),
     body: route.body && validated(route.body, request.body),
+    upload: request.file?.buffer,
     request,
   } as RouteCall<R>;
 }

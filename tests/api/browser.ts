@@ -1,5 +1,5 @@
 import type { Express } from 'express';
-import request from 'supertest';
+import request, { type Test } from 'supertest';
 import { DEMONSTRATION_PASSWORD } from '@seeds/demonstration';
 
 export const EMAILS = {
@@ -19,6 +19,12 @@ export interface Answer {
   readonly headers: Readonly<Record<string, string | undefined>>;
   readonly body: unknown;
   readonly bytes: Uint8Array;
+}
+
+export interface UploadedFile {
+  readonly field: string;
+  readonly bytes: Buffer;
+  readonly fileName: string;
 }
 
 /** A browser: keeps cookies, and sends the token back in a header as Angular's HttpClient does. */
@@ -60,16 +66,30 @@ export class Browser {
     body?: object | string,
     headers: Readonly<Record<string, string>> = {},
   ): Promise<Answer> {
-    const sending = request(this.app)
+    const sending = this.sending(method, path).set(headers);
+    return this.answerTo(
+      body === undefined ? sending : sending.type('application/json').send(body),
+    );
+  }
+
+  /** Sends files to a path below /api, as a form does. */
+  upload(path: string, ...files: readonly UploadedFile[]): Promise<Answer> {
+    const sending = this.sending('post', path);
+    for (const { field, bytes, fileName } of files) sending.attach(field, bytes, fileName);
+    return this.answerTo(sending);
+  }
+
+  private sending(method: Method, path: string): Test {
+    return request(this.app)
       [method](`/api${path}`)
       .set('Cookie', [...this.cookies].map(([name, value]) => `${name}=${value}`).join('; '))
       .set('X-XSRF-TOKEN', this.cookies.get('XSRF-TOKEN') ?? '')
       .set(this.headers)
-      .set(headers)
       .responseType('blob');
-    const response = await (body === undefined
-      ? sending
-      : sending.type('application/json').send(body));
+  }
+
+  private async answerTo(sending: Test): Promise<Answer> {
+    const response = await sending;
     this.keepCookies(response.get('Set-Cookie') ?? []);
     const bytes = response.body as Buffer;
     return {

@@ -24,6 +24,7 @@ const MAY: Record<Exclude<RouteName, Elsewhere>, Role[]> = {
   editLayout: ['owner', 'designer', 'maker'],
   downloadLayout: ['owner', 'designer', 'maker'],
   tellWhereabouts: ['owner', 'designer', 'maker'],
+  preparePicture: ['owner', 'designer'],
   listVersions: ['owner', 'designer', 'maker'],
   keepVersion: ['owner', 'designer', 'maker'],
   readVersion: ['owner', 'designer', 'maker'],
@@ -126,7 +127,7 @@ describe.each(PROTECTED)('%s', (name) => {
   });
 
   it('refuses a body that is missing or broken', async () => {
-    if (!route.body) return;
+    if (!route.body && !route.upload) return;
     for (const body of [undefined, '{"broken":', '[]']) {
       const answer = await browserOf('owner').send(route.method, pathOf(route), body);
       expect(problem(answer, 400).code).toBe('bad-input');
@@ -178,7 +179,9 @@ describe('the OpenAPI document', () => {
       expect(inPath.map((each) => each.name)).toEqual(
         [...route.path.matchAll(/:(\w+)/g)].map(([, parameter]) => parameter),
       );
-      expect(operation.requestBody !== undefined).toBe(route.body !== undefined);
+      expect(operation.requestBody !== undefined).toBe(
+        route.body !== undefined || route.upload !== undefined,
+      );
       expect(operation.responses).toHaveProperty(String(route.answer.status));
       expect(operation.responses).toHaveProperty('503');
       if (route.access !== 'anyone') {
