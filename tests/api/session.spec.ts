@@ -83,6 +83,8 @@ describe('signing in', () => {
     ],
     [{ email: 'a@b.example', password: 7 }, 'password', 'must be text'],
     [{ ...ines, remember: true }, 'remember', 'is not a known key here'],
+    [{ ...ines, email: { toString: 1 } }, 'email', 'must be an e-mail address'],
+    [{ ...ines, email: 'nul\u0000@b.example' }, 'email', 'must be an e-mail address'],
   ])('refuses %o and names the field', async (body, field, message) => {
     const refused = problem(await (await fresh()).post('/session', body), 400);
     expect(refused).toMatchObject({ code: 'bad-input', fields: [{ field, message }] });
