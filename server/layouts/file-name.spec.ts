@@ -8,6 +8,8 @@ it.each([
   ['../../etc/passwd', 'etc-passwd.json'],
   ['=cmd|"x"', 'cmd-x.json'],
   ['…', 'layout.json'],
+  [`a${'𠀀'.repeat(59)}𠀁`, `a${'𠀀'.repeat(59)}.json`],
+  [`${'a'.repeat(59)} lamp`, `${'a'.repeat(59)}.json`],
 ])('the layout %o is saved as %o', (name, fileName) => {
   expect(layoutFileName(name, '.json')).toBe(fileName);
 });
