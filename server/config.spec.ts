@@ -1,3 +1,4 @@
+import express from 'express';
 import { describe, expect, it } from 'vitest';
 import { readConfig } from './config';
 
@@ -26,6 +27,7 @@ describe('the environment at start', () => {
     ],
     [{ DATABASE_URL: undefined }, 'DATABASE_URL must be set to a postgres:// address.'],
     [{ DATABASE_URL: 'mysql://x' }, 'DATABASE_URL must be a postgres:// address.'],
+    [{ DATABASE_URL: 'postgres://h:port/x' }, 'DATABASE_URL must be a postgres:// address.'],
     [{ PORT: '65536' }, 'PORT must be a whole number from 0 to 65535.'],
     [{ PORT: 'abc' }, 'PORT must be a whole number from 0 to 65535.'],
     [{ SESSION_HOURS: '0' }, 'SESSION_HOURS must be a whole number from 1 to 720.'],
@@ -34,10 +36,20 @@ describe('the environment at start', () => {
     expect(readConfig({ ...least, ...change })).toEqual({ ok: false, sentence });
   });
 
-  it('counts proxies, or takes their addresses', () => {
-    expect(readConfig({ ...least, TRUST_PROXY: '1' })).toMatchObject({ config: { trustProxy: 1 } });
-    expect(readConfig({ ...least, TRUST_PROXY: 'loopback' })).toMatchObject({
-      config: { trustProxy: 'loopback' },
-    });
+  it.each([
+    ['1', 1],
+    ['loopback', 'loopback'],
+    ['loopback, 10.0.0.0/8,fd00::/8', 'loopback, 10.0.0.0/8,fd00::/8'],
+  ])('counts proxies, or takes their addresses: %s', (given, trustProxy) => {
+    expect(readConfig({ ...least, TRUST_PROXY: given })).toMatchObject({ config: { trustProxy } });
+    expect(() => express().set('trust proxy', trustProxy)).not.toThrow();
   });
+
+  it.each(['', 'true', 'proxy.example', '10.0.0.0/33', '10.0.0.0/0', 'loopback,'])(
+    'refuses to start when the proxies are said as "%s"',
+    (given) => {
+      const read = readConfig({ ...least, TRUST_PROXY: given });
+      expect(read).toMatchObject({ sentence: expect.stringMatching(/^TRUST_PROXY must be/) });
+    },
+  );
 });

@@ -1,4 +1,5 @@
 /** The environment, read once at start. Nothing else in the server looks at process.env. */
+import { isIP } from 'node:net';
 import * as z from 'zod';
 
 const SECRET_BOUND = 'must be at least 32 characters long';
@@ -11,14 +12,21 @@ const environmentSchema = z.object({
     .default('production'),
   DATABASE_URL: z
     .string({ error: 'must be set to a postgres:// address' })
-    .regex(/^postgres(ql)?:\/\//, 'must be a postgres:// address'),
+    .regex(/^postgres(ql)?:\/\//, 'must be a postgres:// address')
+    .refine(URL.canParse, 'must be a postgres:// address'),
   DATABASE_CONNECTIONS: wholeNumber(1, 100).default(10),
   HOST: z.string().min(1, 'must not be empty').default('127.0.0.1'),
   PORT: wholeNumber(0, 65_535).default(3000),
   SESSION_SECRET: z.string({ error: `must be set; it ${SECRET_BOUND}` }).min(32, SECRET_BOUND),
   SESSION_HOURS: wholeNumber(1, 720).default(12),
   /** How many proxies stand in front, or their addresses as Express takes them; "false" for none. */
-  TRUST_PROXY: z.string().min(1, 'must not be empty').default('false'),
+  TRUST_PROXY: z
+    .string()
+    .refine(
+      isProxyList,
+      'must be "false", a number of proxies, or their addresses such as "loopback, 10.0.0.0/8"',
+    )
+    .default('false'),
   LOG_LEVEL: z
     .enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'], {
       error: 'must be one of fatal, error, warn, info, debug, trace, silent',
@@ -76,6 +84,19 @@ export function readConfig(environment: Readonly<Record<string, string | undefin
       appFolder: values.APP_FOLDER,
     },
   };
+}
+
+/** What Express takes: it would end the start with a stack trace at anything else. */
+function isProxyList(text: string): boolean {
+  return text === 'false' || /^\d{1,2}$/.test(text) || text.split(/ *, */).every(isProxyAddress);
+}
+
+function isProxyAddress(text: string): boolean {
+  if (['loopback', 'linklocal', 'uniquelocal'].includes(text)) return true;
+  const [address = '', bits, ...rest] = text.split('/');
+  const longest = { 0: 0, 4: 32, 6: 128 }[isIP(address)] ?? 0;
+  if (longest === 0 || rest.length > 0) return false;
+  return bits === undefined || (/^[1-9]\d{0,2}$/.test(bits) && Number(bits) <= longest);
 }
 
 function trustedProxies(text: string): boolean | number | string {
