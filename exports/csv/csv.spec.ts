@@ -25,6 +25,10 @@ describe('comma-separated values', () => {
     },
   );
 
+  it('a semicolon begins no formula either, where a spreadsheet takes it for the comma', () => {
+    expect(printed('ash;=cmd(); @SUM;-')).toBe("ash;'=cmd();' @SUM;'-\r\n");
+  });
+
   it('tabs, line breaks and control characters never reach a cell', () => {
     expect(printed('a\t=1\r\n=2\u0000b')).toBe('a =1 =2 b\r\n');
     expect(printed('\t=1')).toBe("' =1\r\n");

@@ -23,12 +23,13 @@ function cellText(cell: Cell): string {
 
 /**
  * A spreadsheet runs a cell that begins with one of these, full-width forms included; an apostrophe before
- * it makes it text (OWASP, "CSV Injection"). Spaces before it do not save it.
+ * it makes it text (OWASP, "CSV Injection"). Spaces before it do not save it. Where the comma is the decimal
+ * sign, a spreadsheet begins a new cell at a semicolon instead, quotes or not.
  */
-const FORMULA_START = /^\s*[=+\-@\uff0b\uff0d\uff1d\uff20]/;
+const FORMULA_STARTS = /(^|;)(?=\s*[=+\-@\uff0b\uff0d\uff1d\uff20])/g;
 
 function withoutFormula(text: string): string {
-  return FORMULA_START.test(text) ? `'${text}` : text;
+  return text.replace(FORMULA_STARTS, "$1'");
 }
 
 /** Tabs and line breaks would start a new cell, and what follows them a formula. */
