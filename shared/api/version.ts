@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { layoutFileSchema } from '../layout/schema';
+import { CONTROL_CHARACTER, layoutFileSchema } from '../layout/schema';
 import { thumbnailSchema } from './commission';
 
 /** A note on a version: may be empty, may have several lines. */
@@ -7,7 +7,7 @@ export const noteSchema = z
   .string({ error: 'must be text' })
   .max(2000, 'must be at most 2000 characters')
   .refine(
-    (text) => !/[\u0000-\u0009\u000b-\u001f\u007f]/.test(text),
+    (text) => !CONTROL_CHARACTER.test(text.replaceAll('\n', '')),
     'must not contain control characters',
   );
 

@@ -83,6 +83,7 @@ describe('keeping a version', () => {
     [{ revision: '0' }, 'revision'],
     [{ revision: 0, note: 'x'.repeat(2001) }, 'note'],
     [{ revision: 0, note: 'bell\u0007' }, 'note'],
+    [{ revision: 0, note: 'half a letter \ud83e' }, 'note'],
   ])('refuses %o', async (body, field) => {
     const { layoutId } = await newCommission(designer);
     const refused = problem(await designer.post(`/layouts/${layoutId}/versions`, body), 400);
