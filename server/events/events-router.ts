@@ -4,7 +4,7 @@ import { API_ROUTES } from '../api-routes';
 import { notFound } from '../http/errors';
 import type { RouteMount } from '../http/route';
 import { isLayoutOf } from '../layouts/layouts-store';
-import { LayoutStream } from './layout-stream';
+import { LayoutStream, type Watcher } from './layout-stream';
 import type { LiveLayouts } from './live-layouts';
 import { putPresence } from './presence-store';
 
@@ -21,7 +21,14 @@ export function mountEvents(mount: RouteMount, { database, live, logger }: Event
     const since = resumedFrom(request.get('Last-Event-ID')) ?? query.since;
     return {
       open: (response) => {
-        live.add(new LayoutStream(database, response, logger, params.id, query.connection, since));
+        const watcher: Watcher = {
+          layoutId: params.id,
+          personId: person.id,
+          sessionId: request.sessionID,
+          connection: query.connection,
+          since,
+        };
+        live.add(new LayoutStream(database, response, logger, watcher));
       },
     };
   });

@@ -9,6 +9,18 @@ const LIFE_MS = 15 * 60_000;
 /** What the browser waits before it connects again. */
 const RETRY_MS = 1_500;
 
+/** Who watches what, from which tab. */
+export interface Watcher {
+  readonly layoutId: string;
+  readonly personId: string;
+  /** The stream ends with the session that opened it. */
+  readonly sessionId: string;
+  /** The browser tab. */
+  readonly connection: string;
+  /** The revision the browser has. */
+  readonly since: number;
+}
+
 /** One browser tab's stream of a layout's edits and people, as text/event-stream. */
 export class LayoutStream {
   private sent: number;
@@ -20,12 +32,10 @@ export class LayoutStream {
     private readonly database: Database,
     private readonly response: Response,
     private readonly logger: Logger,
-    readonly layoutId: string,
-    readonly connection: string,
-    /** The revision the browser has. */
-    since: number,
+    readonly watcher: Watcher,
   ) {
-    this.sent = since;
+    const { layoutId, personId, connection } = watcher;
+    this.sent = watcher.since;
     response.set({
       'Content-Type': 'text/event-stream; charset=utf-8',
       // no-transform keeps compression, ours or a proxy's, from holding events back
@@ -39,7 +49,7 @@ export class LayoutStream {
     response.on('close', () => {
       this.open = false;
       clearTimeout(this.life);
-      removePresence(this.database, this.layoutId, this.connection).catch((error: unknown) => {
+      removePresence(database, layoutId, personId, connection).catch((error: unknown) => {
         // the row is forgotten by itself when nobody renews it
         this.logger.debug({ err: error }, 'presence was not removed');
       });
@@ -54,7 +64,12 @@ export class LayoutStream {
   /** Sends the edits recorded since the last one sent. */
   tellEdits(): void {
     this.queue(async () => {
-      const edits = await editsBetween(this.database, this.layoutId, this.sent, REVISION_MOST);
+      const edits = await editsBetween(
+        this.database,
+        this.watcher.layoutId,
+        this.sent,
+        REVISION_MOST,
+      );
       for (const edit of edits) {
         this.write('edit', edit, edit.revision);
         this.sent = edit.revision;
@@ -65,7 +80,7 @@ export class LayoutStream {
   /** Sends who is here. */
   tellPeople(): void {
     this.queue(async () => {
-      this.write('people', { people: await peopleAt(this.database, this.layoutId) });
+      this.write('people', { people: await peopleAt(this.database, this.watcher.layoutId) });
     });
   }
 

@@ -7,11 +7,14 @@
 import type { OpenDatabase } from '@drizzle/database';
 import { DatabaseListener } from '@drizzle/listen';
 import type { Logger } from 'pino';
-import { renewPresence } from './presence-store';
+import { openSessions } from '../accounts/sessions-store';
 import type { LayoutStream } from './layout-stream';
+import { renewPresence } from './presence-store';
 
+/** How often signs of life are sent, presence renewed and sessions looked at. */
 const RENEW_MS = 8_000;
 
+/** The streams of this process, fed by the notices of the database. */
 export class LiveLayouts {
   private readonly streams = new Map<string, Set<LayoutStream>>();
   private readonly listener: DatabaseListener;
@@ -34,11 +37,12 @@ export class LiveLayouts {
 
   /** Takes a stream in until its browser goes. */
   add(stream: LayoutStream): void {
-    const beside = this.streams.get(stream.layoutId) ?? new Set<LayoutStream>();
-    this.streams.set(stream.layoutId, beside.add(stream));
+    const { layoutId } = stream.watcher;
+    const beside = this.streams.get(layoutId) ?? new Set<LayoutStream>();
+    this.streams.set(layoutId, beside.add(stream));
     stream.onClosed(() => {
       beside.delete(stream);
-      if (beside.size === 0) this.streams.delete(stream.layoutId);
+      if (beside.size === 0) this.streams.delete(layoutId);
     });
     stream.tellEdits();
     stream.tellPeople();
@@ -71,10 +75,20 @@ export class LiveLayouts {
     try {
       await renewPresence(
         this.open.database,
-        open.map((stream) => stream.connection),
+        open.map(({ watcher }) => watcher.connection),
       );
+      await this.endWithSessions(open);
     } catch (error) {
       this.logger.warn({ err: error }, 'presence was not renewed');
+    }
+  }
+
+  /** Whoever has signed out, here or at another process, sees no more of the layout. */
+  private async endWithSessions(streams: readonly LayoutStream[]): Promise<void> {
+    const ids = new Set(streams.map(({ watcher }) => watcher.sessionId));
+    const open = await openSessions(this.open.database, [...ids]);
+    for (const stream of streams) {
+      if (!open.has(stream.watcher.sessionId)) stream.end();
     }
   }
 

@@ -41,13 +41,22 @@ export async function putPresence(
   await tellOfPeople(database, layoutId);
 }
 
-/** The tab is gone. */
+/** The tab is gone. Others see its connection's name, so it also takes the person who opened it. */
 export async function removePresence(
   database: Database,
   layoutId: string,
+  personId: string,
   connection: string,
 ): Promise<void> {
-  await database.delete(presence).where(eq(presence.connection, connection));
+  await database
+    .delete(presence)
+    .where(
+      and(
+        eq(presence.connection, connection),
+        eq(presence.layoutId, layoutId),
+        eq(presence.personId, personId),
+      ),
+    );
   await tellOfPeople(database, layoutId);
 }
 

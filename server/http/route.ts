@@ -174,7 +174,8 @@ function sendAnswer(route: RouteDeclaration, response: Response, answer: unknown
   if (route.answer.status === 204) {
     response.status(204).end();
   } else if ('stream' in route.answer) {
-    (answer as StreamAnswer).open(response);
+    // a browser that went meanwhile will never close it
+    if (!response.destroyed) (answer as StreamAnswer).open(response);
   } else if ('file' in route.answer) {
     const { fileName, content } = answer as FileAnswer;
     response.attachment(fileName).type(route.answer.file);

@@ -33,6 +33,7 @@ export class EventStream {
   readonly events: StreamEvent[] = [];
   status = 0;
   contentType = '';
+  ended = false;
   private readonly request: ClientRequest;
   private waiting: (() => void)[] = [];
   private rest = '';
@@ -76,6 +77,7 @@ export class EventStream {
       for (const block of blocks) this.take(block);
       for (const wake of this.waiting.splice(0)) wake();
     });
+    response.on('end', () => (this.ended = true));
     response.on('error', () => undefined);
   }
 

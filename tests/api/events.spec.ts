@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { liveEventSchemas } from '@shared/api/live';
 import { recordedEditSchema } from '@shared/api/layout';
 import { sql } from 'drizzle-orm';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { Browser, signedIn } from './browser';
 import { editOf, laid, newCommission, problem } from './demonstration';
 import { EventStream, listening, type Listening } from './event-stream';
@@ -106,6 +106,15 @@ describe('watching a layout', () => {
     expect(problem(await unknown.get(path), 401).code).toBe('not-signed-in');
   });
 
+  it('ends soon after its session did', async () => {
+    const id = await newLayout();
+    const leaving = await signedIn(running.app, 'maker');
+    const stream = watch(leaving, there, id);
+    await stream.until(({ event }) => event === 'people');
+    await leaving.delete('/session');
+    await vi.waitFor(() => expect(stream.ended).toBe(true), { timeout: 20_000, interval: 200 });
+  });
+
   it('refuses a revision that is no number by its name', async () => {
     const id = await newLayout();
     const answer = await maker.get(`/layouts/${id}/events?since=last&connection=here`);
@@ -130,6 +139,28 @@ describe('who is here', () => {
     await mine.until(
       (event) => mine.events.indexOf(event) >= after && peopleIn(event).length === 0,
     );
+  });
+});
+
+describe('the name of somebody else’s connection', () => {
+  it('does not let anybody move them or make them go', async () => {
+    const id = await newLayout();
+    const mine = watch(designer, here, id);
+    const connection = randomUUID();
+    watch(maker, there, id, { connection });
+    await maker.post(`/layouts/${id}/here`, { connection, station: 'joint', tile: null });
+    await mine.until((event) => peopleIn(event).length === 1);
+    const claimed = watch(designer, here, id, { connection });
+    await claimed.until(({ event }) => event === 'people');
+    const tomas = [{ person: { name: 'Tomas Okoye' }, station: 'joint' }];
+    const told = async (what: () => unknown) => {
+      const before = mine.events.length;
+      await what();
+      return peopleIn(await mine.until((event) => mine.events.indexOf(event) >= before));
+    };
+    const move = { connection, station: 'shell', tile: null };
+    expect(await told(() => designer.post(`/layouts/${id}/here`, move))).toMatchObject(tomas);
+    expect(await told(() => claimed.close())).toMatchObject(tomas);
   });
 });
 
