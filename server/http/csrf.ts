@@ -19,6 +19,7 @@ export interface CsrfGuard {
   readonly demand: (request: Request) => void;
 }
 
+/** A guard whose tokens are signed with this secret, so that every server process takes them. */
 export function createCsrfGuard(secret: string): CsrfGuard {
   const signature = (nonce: string, sessionId: string) =>
     createHmac('sha256', secret).update(`csrf ${nonce} ${sessionId}`).digest('base64url');

@@ -40,8 +40,10 @@ export class ApiError extends Error {
   }
 }
 
+/** Refuses what is not there, or not for this person to know of. */
 export const notFound = (what: string) => new ApiError('not-found', `There is no such ${what}.`);
 
+/** Refuses input field by field, with the first as its sentence. */
 export const badInput = (fields: readonly Problem[]) =>
   new ApiError('bad-input', sentenceOf(fields), fields);
 
