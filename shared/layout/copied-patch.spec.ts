@@ -43,6 +43,7 @@ describe('a patch copied', () => {
       text.replace('"staves":2', '"staves":3'),
       text.replace('"formatVersion":1', '"formatVersion":2'),
       text.replace(/"cells":".{4}/, '"cells":"////'),
+      text.replace('"key":"walnut"', '"key":"ash"'),
       text.replace('"format"', '"other":1,"format"'),
       ' '.repeat(70_000),
     ];

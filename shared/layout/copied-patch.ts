@@ -60,6 +60,7 @@ export function readCopiedPatch(text: string): CopiedPatch | null {
   if (!parsed.success || !cells) return null;
   const { staves, courses, woods } = parsed.data;
   if (cells.length !== staves * courses || cells.some((wood) => wood >= woods.length)) return null;
+  if (new Set(woods.map(({ key }) => key)).size < woods.length) return null;
   return { staves, courses, woods, cells };
 }
 

@@ -1,20 +1,11 @@
 import { BreakpointObserver } from '@angular/cdk/layout';
-import {
-  Component,
-  computed,
-  DestroyRef,
-  effect,
-  inject,
-  signal,
-  untracked,
-  viewChild,
-} from '@angular/core';
+import { Component, computed, effect, inject, signal, untracked, viewChild } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
-import { countWoods, roundStave, type Grid } from '@shared/layout/cells';
+import { countWoods, roundStave, tileName, type Grid } from '@shared/layout/cells';
+import { printCopiedPatch, readCopiedPatch } from '@shared/layout/copied-patch';
 import type { Tile } from '@shared/layout/extent';
-import { layChange } from '@shared/layout/patch';
 import { addWood, editWood, removeWood, type WoodWords } from '@shared/layout/wood-changes';
 import { ringOf } from '@shared/shell/ring';
 import { formatAngle, formatLength } from '@shared/units/format';
@@ -22,17 +13,19 @@ import { map } from 'rxjs';
 import { groundOf, initialsOf } from '../../drawing/avatar';
 import { Icon } from '../../drawing/icon';
 import { Announcer } from '../../platform/announcer';
-import { LayoutStore, type Gesture } from '../layout-store';
+import { LayoutStore } from '../layout-store';
 import { LiveEvents } from '../live-events';
 import type { PersonMark } from './canvas/overlay-painting';
 import { PatternCanvas } from './canvas/pattern-canvas';
 import type { ViewSpan } from './canvas/view-span';
+import { KeysDialog } from './keys/keys-dialog';
+import { PatternHand } from './pattern-hand';
 import { PatternTool } from './pattern-tool';
 import { RoundPanel } from './round/round-panel';
 import { SentenceBar } from './sentence-bar/sentence-bar';
 import { inSentence } from './sentence-words';
 import { PatternSide } from './side/pattern-side';
-import { laidWords, tileWords } from './spoken';
+import { tileWords } from './spoken';
 import { RemoveWoodDialog, type RemoveWoodQuestion } from './wood-tray/remove-wood-dialog';
 import { WoodDialog, type WoodQuestion } from './wood-tray/wood-dialog';
 import { WoodTray } from './wood-tray/wood-tray';
@@ -44,18 +37,22 @@ const LAYING_FROM = '(min-width: 768px)';
 @Component({
   selector: 'sl-pattern-station',
   imports: [Icon, MatButton, PatternCanvas, PatternSide, RoundPanel, SentenceBar, WoodTray],
-  providers: [PatternTool],
+  providers: [PatternTool, PatternHand],
   templateUrl: './pattern-station.html',
   styleUrl: './pattern-station.scss',
-  host: { '(document:keydown)': 'pick($event)' },
+  host: {
+    '(document:keydown)': 'pick($event)',
+    '(document:copy)': 'copy($event)',
+    '(document:paste)': 'paste($event)',
+  },
 })
 export class PatternStation {
   protected readonly store = inject(LayoutStore);
   protected readonly tool = inject(PatternTool);
+  protected readonly hand = inject(PatternHand);
   private readonly dialogs = inject(MatDialog);
   private readonly announcer = inject(Announcer);
   protected readonly canvas = viewChild.required(PatternCanvas);
-  private gesture: Gesture | null = null;
 
   private readonly wide = toSignal(
     inject(BreakpointObserver)
@@ -73,8 +70,6 @@ export class PatternStation {
     }),
   );
   protected readonly span = signal<ViewSpan | null>(null);
-  private readonly pointedAt = signal<Tile | null>(null);
-  private readonly standsOn = signal<Tile | null>(null);
 
   /** Why nothing can be laid here, or null. */
   protected readonly locked = computed(() => {
@@ -87,20 +82,23 @@ export class PatternStation {
     return this.wide() ? null : 'To lay tiles, open the pattern on a wider screen.';
   });
   protected readonly mode = computed(() => (this.locked() === null ? 'lay' : 'look'));
-  protected readonly preview = computed<readonly number[]>(() => {
-    const tile = this.standsOn() ?? this.pointedAt();
-    return tile && this.mode() === 'lay' ? [...this.tool.positionsFor([tile])] : [];
+  protected readonly preview = computed(() => (this.mode() === 'lay' ? this.hand.reached() : []));
+  protected readonly hint = computed(() => {
+    if (this.mode() !== 'lay') {
+      return 'Drag to turn the shell; Ctrl and the wheel, or two fingers, come nearer.';
+    }
+    return (
+      this.hand.words() ??
+      'Drag with Space or the middle button, or with two fingers, to turn the shell.'
+    );
   });
-  protected readonly hint = computed(() =>
-    this.mode() === 'lay'
-      ? 'Drag with Space or the middle button, or with two fingers, to turn the shell.'
-      : 'Drag to turn the shell; Ctrl and the wheel, or two fingers, come nearer.',
-  );
   protected readonly label = computed(() => {
     const { staves, courses } = this.store.grid();
     const hand =
-      this.mode() === 'lay' ? 'Arrow keys walk the tiles, Space lays, Escape stops.' : '';
-    return `Pattern, ${staves} staves by ${courses} courses. ${hand} Plus and minus zoom, Shift with arrows moves the view.`;
+      this.mode() === 'lay'
+        ? 'Arrow keys walk the tiles, Space lays, P marks the corner of a patch, Escape stops.'
+        : '';
+    return `Pattern, ${staves} staves by ${courses} courses. ${hand} Plus and minus zoom, Shift with arrows moves the view, the question mark lists all keys.`;
   });
   protected readonly sizes = computed(() => {
     const { shell, lengthUnit } = this.store.layout();
@@ -112,58 +110,63 @@ export class PatternStation {
   });
 
   constructor() {
-    // Whoever leaves in the middle of a stroke keeps what it has laid.
-    inject(DestroyRef).onDestroy(() => this.end());
     const live = inject(LiveEvents);
     effect(() => {
-      const tile = this.standsOn() ?? this.pointedAt();
+      const tile = this.hand.at();
       const stave = tile && roundStave(this.store.grid(), tile.stave);
       untracked(() => live.moveTo({ tile: tile && { stave: stave ?? 0, course: tile.course } }));
     });
   }
 
-  protected begin(): void {
-    this.gesture = this.store.begin(`Lay ${this.tool.woodName()}`);
-  }
-
-  protected meet(tiles: readonly Tile[]): void {
-    const positions = this.tool.positionsFor(tiles);
-    this.gesture?.apply(layChange(this.store.cells(), positions, this.tool.wood()));
-  }
-
-  protected end(): void {
-    this.gesture?.finish();
-    this.gesture = null;
-  }
-
   protected cancel(): void {
-    this.gesture?.cancel();
-    this.gesture = null;
+    this.hand.cancel();
     this.announcer.speak('The stroke is taken back.');
   }
 
-  protected point(tile: Tile | null): void {
-    this.pointedAt.set(tile);
-  }
-
   protected walk(tile: Tile | null): void {
-    this.standsOn.set(tile);
-    this.announcer.speak(tile ? tileWords(this.store.layout(), tile) : 'Stopped.');
+    this.hand.walk(tile);
+    if (!tile) {
+      this.announcer.speak('Stopped.');
+      return;
+    }
+    const comesTo = this.mode() === 'lay' ? ` ${this.hand.words() ?? ''}` : '';
+    this.announcer.speak(tileWords(this.store.layout(), tile) + comesTo);
   }
 
-  protected layByKey(tile: Tile): void {
-    const positions = this.tool.positionsFor([tile]);
-    const change = layChange(this.store.cells(), positions, this.tool.wood());
-    this.store.edit(`Lay ${this.tool.woodName()}`, change);
-    this.announcer.speak(laidWords(tile, change?.positions.length ?? 0, this.tool.woodName()));
+  protected mark(tile: Tile): void {
+    this.hand.mark(tile);
+    const corner = tileName(tile.stave, tile.course);
+    this.announcer.speak(`Corner at ${corner}. Arrow keys draw the patch out, Space takes it.`);
+  }
+
+  /** Ctrl C: the patch the keyboard has drawn out, or the tile it stands on. */
+  protected copy(event: ClipboardEvent): void {
+    if (this.busyElsewhere(event) || !getSelection()?.isCollapsed) return;
+    const patch = this.hand.copyStanding() ? this.tool.copied() : null;
+    if (!patch) return;
+    event.clipboardData?.setData('text/plain', printCopiedPatch(patch));
+    event.preventDefault();
+  }
+
+  /** Ctrl V: a patch from the clipboard, or else the one copied last in this browser. */
+  protected paste(event: ClipboardEvent): void {
+    if (this.mode() !== 'lay' || this.busyElsewhere(event)) return;
+    const clipboard = event.clipboardData;
+    if (clipboard && clipboard.files.length > 0) return;
+    const patch = readCopiedPatch(clipboard?.getData('text/plain') ?? '') ?? this.tool.copied();
+    if (patch) this.hand.paste(patch);
+    else this.announcer.tell('There is no copied patch. Stand on a tile and press Ctrl C first.');
+  }
+
+  protected showKeys(): void {
+    this.dialogs.open(KeysDialog, { width: '560px' });
   }
 
   /** The number keys take a wood into the hand: 1 to 9, and 0 for the tenth. */
   protected pick(event: KeyboardEvent): void {
-    if (event.ctrlKey || event.metaKey || event.altKey || this.mode() !== 'lay') return;
-    if (!/^\d$/.test(event.key) || isEntry(event.target) || this.dialogs.openDialogs.length > 0) {
-      return;
-    }
+    if (event.ctrlKey || event.metaKey || event.altKey || this.busyElsewhere(event)) return;
+    if (event.key === '?') this.showKeys();
+    if (this.mode() !== 'lay' || !/^\d$/.test(event.key)) return;
     const index = (Number(event.key) + 9) % 10;
     const wood = this.store.woods()[index];
     if (!wood) return;
@@ -218,6 +221,10 @@ export class PatternStation {
     if (!wood || heir < 0) return;
     this.store.edit(`Take out ${inSentence(wood.name)}`, ...removeWood(layout, index, heir));
     this.announcer.offer(`${wood.name} is taken out.`, 'Undo', () => this.store.undo());
+  }
+
+  private busyElsewhere({ target }: Event): boolean {
+    return isEntry(target) || this.dialogs.openDialogs.length > 0;
   }
 
   private askWood(data: WoodQuestion, take: (words: WoodWords) => void): void {

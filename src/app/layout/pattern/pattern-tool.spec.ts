@@ -10,13 +10,14 @@ const wood = (name: string) => ({ key: name, name, colour: '#DCC39A', sawn: 'fla
 describe('what the next touch lays', () => {
   const grid = signal<Grid>({ staves: 32, courses: 9 });
   const woods = signal([wood('White ash'), wood('Black walnut'), wood('Sapele')]);
+  const cells = signal(new Uint8Array(32 * 9));
   let tool: PatternTool;
 
   beforeEach(() => {
     grid.set({ staves: 32, courses: 9 });
     woods.set([wood('White ash'), wood('Black walnut'), wood('Sapele')]);
     TestBed.configureTestingModule({
-      providers: [PatternTool, { provide: LayoutStore, useValue: { grid, woods } }],
+      providers: [PatternTool, { provide: LayoutStore, useValue: { grid, woods, cells } }],
     });
     tool = TestBed.inject(PatternTool);
   });

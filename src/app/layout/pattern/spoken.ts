@@ -1,8 +1,8 @@
 /** What the keyboard's place sounds like: position, wood, and the neighbours' woods. */
 import { cellAt, courseLetters, roundStave, tileName } from '@shared/layout/cells';
-import type { Tile } from '@shared/layout/extent';
-import type { Layout } from '@shared/layout/schema';
-import { inSentence, tilesWords } from './sentence-words';
+import type { Tile, TileBox } from '@shared/layout/extent';
+import type { Layout, Wood } from '@shared/layout/schema';
+import { inSentence, sizeWords, tilesWords } from './sentence-words';
 
 /** "D 12, white ash. Left black walnut, right white ash, above white ash, below the end of the shell." */
 export function tileWords(layout: Pick<Layout, 'shell' | 'woods' | 'cells'>, tile: Tile): string {
@@ -29,4 +29,18 @@ export function laidWords(tile: Tile, count: number, wood: string): string {
   return count === 1
     ? `${place} is now ${wood}.`
     : `Laid ${wood} on ${tilesWords(count)} from ${place}.`;
+}
+
+/** "8 tiles will change." and what else a touch there would come to. */
+export function touchWords(reached: number, changed: number, added: readonly Wood[]): string {
+  if (reached === 0) return 'No tile is reached here.';
+  const woods = added.map(({ name }) => inSentence(name)).join(', ');
+  const more = woods === '' ? '' : ` Adds ${woods} to the woods.`;
+  if (changed === 0) return `Nothing changes: ${tilesWords(reached)} already so.${more}`;
+  return `${tilesWords(changed)} will change.${more}`;
+}
+
+/** "Copied 3 × 2 tiles from D 12." */
+export function copiedWords(box: TileBox): string {
+  return `Copied ${sizeWords(box)} from ${tileName(box.stave, box.course)} to the right and up. Lay them here or in another layout.`;
 }

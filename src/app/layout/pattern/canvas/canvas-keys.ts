@@ -5,6 +5,7 @@ export type CanvasKey =
   | { readonly kind: 'pan'; readonly x: number; readonly y: number }
   | { readonly kind: 'zoom'; readonly direction: 'in' | 'out' }
   | { readonly kind: 'space' }
+  | { readonly kind: 'mark' }
   | { readonly kind: 'stop' }
   | { readonly kind: 'whole' };
 
@@ -17,6 +18,8 @@ const ARROWS: Partial<Record<string, { readonly x: number; readonly y: number }>
 
 const OTHERS: Partial<Record<string, CanvasKey>> = {
   ' ': { kind: 'space' },
+  p: { kind: 'mark' },
+  P: { kind: 'mark' },
   Escape: { kind: 'stop' },
   '+': { kind: 'zoom', direction: 'in' },
   '=': { kind: 'zoom', direction: 'in' },

@@ -1,4 +1,4 @@
-import type { ElementRef } from '@angular/core';
+import type { ElementRef, OutputEmitterRef } from '@angular/core';
 import {
   afterNextRender,
   Component,
@@ -77,6 +77,8 @@ export class PatternCanvas implements OnDestroy {
   /** Where the keyboard stands, or null when it has left. */
   readonly walked = output<Tile | null>();
   readonly laidByKey = output<Tile>();
+  /** The corner of a patch, marked with the keyboard. */
+  readonly marked = output<Tile>();
   readonly viewChanged = output<ViewSpan>();
 
   private readonly surface = viewChild.required<ElementRef<HTMLElement>>('surface');
@@ -287,7 +289,9 @@ export class PatternCanvas implements OnDestroy {
         this.window.pan(-key.x * PAN_STEP_PX, -key.y * PAN_STEP_PX);
         return true;
       case 'space':
-        return this.layAtCursor();
+        return this.atCursor(this.laidByKey);
+      case 'mark':
+        return this.atCursor(this.marked);
       case 'stop':
         return this.stop();
       case 'zoom':
@@ -309,10 +313,10 @@ export class PatternCanvas implements OnDestroy {
     this.walked.emit(next);
   }
 
-  private layAtCursor(): boolean {
+  private atCursor(does: OutputEmitterRef<Tile>): boolean {
     const cursor = this.cursor();
     if (cursor === null || this.mode() !== 'lay') return false;
-    this.laidByKey.emit(cursor);
+    does.emit(cursor);
     return true;
   }
 
