@@ -1,7 +1,9 @@
 import type { Grid } from '../cells';
+import { PATTERN_BOUNDS } from './bounds';
 import {
   divisorsOf,
   filled,
+  greatestDivisor,
   modulo,
   nearestFirst,
   periodOf,
@@ -22,7 +24,7 @@ export function layChecker(pattern: Checker, grid: Grid): LaidPattern {
     return woods[field % woods.length] ?? 0;
   });
   const round = staves * woods.length;
-  if (grid.staves % round === 0) return { meets: true, cells };
+  if (grid.staves % round === 0) return { meets: true, cells, period: round };
   const widths = divisorsOf(grid.staves).filter((w) => grid.staves % (w * woods.length) === 0);
   return {
     meets: false,
@@ -35,24 +37,33 @@ export function layChecker(pattern: Checker, grid: Grid): LaidPattern {
 
 /** Level bands from the bottom; they always meet. */
 export function layBands(pattern: Bands, grid: Grid): LaidPattern {
-  return { meets: true, cells: filled(grid, (_, course) => woodOfStripe(pattern.stripes, course)) };
+  const cells = filled(grid, (_, course) => woodOfStripe(pattern.stripes, course));
+  return { meets: true, cells, period: 1 };
 }
 
-/** Stripes that climb; meets when one turn climbs a whole number of stripe rounds. */
+/**
+ * Stripes that climb; meets when one turn climbs a whole number of stripe rounds, which then is the number of
+ * strands that run side by side. The left hand is the right one in a mirror.
+ */
 export function layHelix(pattern: Helix, grid: Grid): LaidPattern {
-  const { stripes, lead } = pattern;
-  const climbed = (stave: number) => Math.floor((stave * lead) / grid.staves + 1e-9);
-  const cells = filled(grid, (stave, course) => woodOfStripe(stripes, course - climbed(stave)));
+  const { stripes, lead, hand } = pattern;
+  const { staves } = grid;
+  const climbed = (stave: number) => Math.floor((stave * lead) / staves);
+  const cells = filled(grid, (stave, course) =>
+    woodOfStripe(stripes, course - climbed(hand === 'right' ? stave : staves - 1 - stave)),
+  );
   const round = periodOf(stripes);
-  if (Number.isInteger(lead) && modulo(lead, round) === 0) return { meets: true, cells };
-  const hand = lead < 0 ? -1 : 1;
-  const leads = [1, 2, 3, 4, 5, 6, 7, 8].map((turns) => hand * turns * round);
+  if (lead % round === 0) {
+    return { meets: true, cells, period: staves / greatestDivisor(staves, lead / round) };
+  }
+  const strands = Math.max(1, Math.floor(lead / round) - 2);
+  const leads = Array.from({ length: 6 }, (_, i) => (strands + i) * round);
   return {
     meets: false,
     cells,
     field: 'lead',
-    reason: `A lead of ${lead} courses a turn does not meet at the seam: the stripes repeat every ${round} courses.`,
-    offers: nearestFirst(leads, lead),
+    reason: `A lead of ${lead} ${lead === 1 ? 'course' : 'courses'} a turn does not meet at the seam: the stripes repeat every ${round} courses.`,
+    offers: nearestFirst(leads.filter(isLead), lead),
   };
 }
 
@@ -83,8 +94,12 @@ export function layZigzag(pattern: Zigzag, grid: Grid): LaidPattern {
   return dividing(grid, staves, 'Crests', cells);
 }
 
+function isLead(lead: number): boolean {
+  return lead >= PATTERN_BOUNDS.lead.least && lead <= PATTERN_BOUNDS.lead.most;
+}
+
 function dividing(grid: Grid, period: number, what: string, cells: Uint8Array): LaidPattern {
-  if (grid.staves % period === 0) return { meets: true, cells };
+  if (grid.staves % period === 0) return { meets: true, cells, period };
   return {
     meets: false,
     cells,

@@ -23,7 +23,7 @@ export function layScatter(pattern: Scatter, grid: Grid): LaidPattern {
   pattern.shares.forEach(({ wood }, i) => {
     for (let n = counts[i] ?? 0; n > 0; n--) cells[order[next++] ?? 0] = wood;
   });
-  return { meets: true, cells };
+  return { meets: true, cells, period: grid.staves };
 }
 
 /** How many tiles each wood gets: shares of the total, remainders to the largest. */

@@ -24,11 +24,16 @@ export interface Bands {
   readonly stripes: readonly Stripe[];
 }
 
+export const HANDS = ['right', 'left'] as const;
+export type Hand = (typeof HANDS)[number];
+
 export interface Helix {
   readonly kind: 'helix';
   readonly stripes: readonly Stripe[];
-  /** Courses climbed in one turn to the right; negative climbs to the left. */
+  /** Courses climbed in one turn. */
   readonly lead: number;
+  /** Which way it climbs, as seen from outside. */
+  readonly hand: Hand;
 }
 
 export interface Diamonds {
@@ -60,9 +65,27 @@ export interface Scatter {
 
 export type StartingPattern = Checker | Bands | Helix | Diamonds | Zigzag | Scatter;
 
+export const PATTERN_KINDS = [
+  'checker',
+  'bands',
+  'helix',
+  'diamonds',
+  'zigzag',
+  'scatter',
+] as const satisfies readonly StartingPattern['kind'][];
+export type PatternKind = (typeof PATTERN_KINDS)[number];
+
+/** The pattern of a kind. */
+export type PatternOf<K extends PatternKind> = Extract<StartingPattern, { readonly kind: K }>;
+
 /** The laid cells, or why the pattern does not meet itself and the values of a field that would. */
 export type LaidPattern =
-  | { readonly meets: true; readonly cells: Uint8Array }
+  | {
+      readonly meets: true;
+      readonly cells: Uint8Array;
+      /** Turned by this many staves the pattern is itself again; divides the staves. */
+      readonly period: number;
+    }
   | {
       readonly meets: false;
       readonly cells: Uint8Array;
@@ -101,6 +124,11 @@ export function woodOfStripe(stripes: readonly Stripe[], position: number): numb
     left -= width;
   }
   return stripes[0]?.wood ?? 0;
+}
+
+/** The greatest whole number that divides both. */
+export function greatestDivisor(a: number, b: number): number {
+  return b === 0 ? Math.abs(a) : greatestDivisor(b, a % b);
 }
 
 /** Whole numbers that divide another, ascending. */

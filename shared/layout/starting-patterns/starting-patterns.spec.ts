@@ -1,5 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { countWoods } from '../cells';
+import { patternProblems } from './bounds';
+import { firstPatterns } from './first-pattern';
 import { layStartingPattern } from './lay-pattern';
 import type { StartingPattern } from './starting-pattern';
 
@@ -21,7 +23,7 @@ describe('a starting pattern that meets itself at the seam', () => {
   const patterns: { pattern: StartingPattern; period: number }[] = [
     { pattern: { kind: 'checker', woods: [0, 1], staves: 2, courses: 1 }, period: 4 },
     { pattern: { kind: 'bands', stripes: TWO }, period: 1 },
-    { pattern: { kind: 'helix', stripes: TWO, lead: 8 }, period: 16 },
+    { pattern: { kind: 'helix', stripes: TWO, lead: 8, hand: 'right' }, period: 16 },
     {
       pattern: { kind: 'diamonds', ground: 0, diamond: 1, staves: 8, courses: 9, drawn: 'outline' },
       period: 8,
@@ -38,9 +40,11 @@ describe('a starting pattern that meets itself at the seam', () => {
 
 describe('a starting pattern that cannot meet itself', () => {
   it('offers the leads with which a helix meets, nearest first', () => {
-    const laid = layStartingPattern({ kind: 'helix', stripes: TWO, lead: 9 }, GRID);
+    const laid = layStartingPattern({ kind: 'helix', stripes: TWO, lead: 9, hand: 'right' }, GRID);
     expect(laid).toMatchObject({ meets: false, field: 'lead', offers: [8, 12, 4, 16, 20] });
-    expect(layStartingPattern({ kind: 'helix', stripes: TWO, lead: 8 }, GRID).meets).toBe(true);
+    expect(
+      layStartingPattern({ kind: 'helix', stripes: TWO, lead: 8, hand: 'right' }, GRID).meets,
+    ).toBe(true);
   });
 
   it('offers the widths of diamonds that divide the staves', () => {
@@ -73,5 +77,58 @@ describe('a scatter', () => {
     const { cells } = layStartingPattern({ kind: 'scatter', shares: sparse, seed: 1 }, GRID);
     const next = turned(cells, GRID.staves, 1);
     expect(cells.some((wood, p) => wood === 1 && next[p] === 1)).toBe(false);
+  });
+});
+
+describe('a helix', () => {
+  const helix = { kind: 'helix', stripes: TWO, lead: 8, hand: 'right' } as const;
+
+  it('of the left hand is the one of the right hand in a mirror', () => {
+    const right = layStartingPattern(helix, GRID).cells;
+    const left = layStartingPattern({ ...helix, hand: 'left' }, GRID).cells;
+    const mirrored = right.map((_, p) => right[p - (p % 32) + 31 - (p % 32)] ?? 0);
+    expect(left).toEqual(mirrored);
+  });
+
+  it('offers leads near the wished one, however steep it is', () => {
+    const laid = layStartingPattern({ ...helix, lead: 101 }, GRID);
+    expect(laid).toMatchObject({ meets: false, offers: [100, 104, 96, 108, 92] });
+  });
+});
+
+describe('the first pattern of each kind', () => {
+  it.each([
+    { staves: 32, courses: 9 },
+    { staves: 25, courses: 1 },
+    { staves: 7, courses: 14 },
+    { staves: 240, courses: 120 },
+  ])(
+    'is within its bounds on $staves × $courses, and meets where anything of its kind does',
+    (grid) => {
+      for (const pattern of Object.values(firstPatterns(grid, 0, 1))) {
+        expect(patternProblems(pattern, 2)).toEqual([]);
+        if (pattern.kind === 'scatter') continue;
+        const oddChecker = pattern.kind === 'checker' && grid.staves % 2 === 1;
+        expect(layStartingPattern(pattern, grid).meets).toBe(!oddChecker);
+      }
+    },
+  );
+});
+
+describe('what cannot be laid', () => {
+  it.each([
+    [{ kind: 'bands', stripes: [{ wood: 0, width: 0 }] }, 'stripes.0.width'],
+    [{ kind: 'bands', stripes: [] }, 'stripes'],
+    [{ kind: 'bands', stripes: [{ wood: 2, width: 1 }] }, 'stripes.0.wood'],
+    [{ kind: 'checker', woods: [0], staves: 1, courses: 1 }, 'woods'],
+    [{ kind: 'checker', woods: [0, 1], staves: 0, courses: 1 }, 'staves'],
+    [{ kind: 'helix', stripes: TWO, lead: 0, hand: 'left' }, 'lead'],
+    [{ kind: 'helix', stripes: TWO, lead: 2.5, hand: 'left' }, 'lead'],
+    [{ kind: 'zigzag', stripes: TWO, staves: 1, rise: 1 }, 'staves'],
+    [{ kind: 'zigzag', stripes: TWO, staves: 4, rise: 0 }, 'rise'],
+    [{ kind: 'scatter', shares: [{ wood: 0, share: 0 }], seed: 1 }, 'shares'],
+    [{ kind: 'scatter', shares: [{ wood: 0, share: -1 }], seed: 1 }, 'shares.0.share'],
+  ] satisfies [StartingPattern, string][])('%o is refused at %s', (pattern, field) => {
+    expect(patternProblems(pattern, 2).map((problem) => problem.field)).toContain(field);
   });
 });

@@ -10,6 +10,7 @@ import { filter, firstValueFrom, map, startWith } from 'rxjs';
 import { Trouble } from '../drawing/trouble';
 import { BarActions } from '../platform/bar-actions';
 import { BarSlot } from '../platform/bar-slot';
+import { askCarry } from './carry/ask-carry';
 import { ContestDialog, type ContestAnswer, type ContestQuestion } from './contest-dialog';
 import { KeepVersion } from './keep-version';
 import { LayoutStore } from './layout-store';
@@ -128,18 +129,19 @@ export class LayoutPage {
       options,
     );
     const answer = await firstValueFrom(asked.afterClosed());
+    if (answer === 'mine') await this.keepMine(contest);
     this.asking = false;
-    if (answer === 'mine') this.keepMine(contest);
     this.store.settleContest(contest);
   }
 
-  private keepMine(contest: Contest): void {
-    const layout = this.store.layout();
+  private async keepMine(contest: Contest): Promise<void> {
     if (contest.kind === 'grid') {
-      this.store.edit('Resize the shell', resizeChange(layout, contest.mine));
+      const carry = await askCarry(this.dialogs, this.store.layout(), contest.mine);
+      if (carry === null) return;
+      this.store.edit('Resize the shell', resizeChange(this.store.layout(), contest.mine, carry));
     } else {
       const { path, after } = contest.mine;
-      this.store.edit('Keep my value', fieldChange(layout, path, after));
+      this.store.edit('Keep my value', fieldChange(this.store.layout(), path, after));
     }
   }
 }

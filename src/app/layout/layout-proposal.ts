@@ -13,7 +13,7 @@ import {
   type FieldPath,
   type LayoutFields,
 } from '@shared/layout/patch';
-import { resizeChange } from '@shared/layout/carry';
+import { resizeChange, type Carry } from '@shared/layout/carry';
 import type { Layout, Problem } from '@shared/layout/schema';
 import { madeChanges } from './draft';
 import type { LayoutStore } from './layout-store';
@@ -21,9 +21,14 @@ import type { LayoutStore } from './layout-store';
 /** Values by field. */
 export type Wishes = Partial<LayoutFields>;
 
+interface GridWish {
+  readonly grid: Grid;
+  readonly carry: Carry;
+}
+
 export class LayoutProposal {
   private readonly wishes = signal<Wishes>({});
-  private readonly gridWish = signal<Grid | null>(null);
+  private readonly gridWish = signal<GridWish | null>(null);
 
   /** The document with what is being typed, whether it holds together or not. */
   readonly candidate: Signal<Layout>;
@@ -47,13 +52,18 @@ export class LayoutProposal {
 
   /** A size of the grid is being typed: drawn, but not yet an edit, since tiles would be cut off. */
   preview(grid: Grid): void {
-    this.gridWish.set(grid);
+    this.gridWish.set({ grid, carry: 'keep' });
   }
 
-  /** The typed size of the grid counts. */
-  resize(grid: Grid, label: string): void {
-    this.gridWish.set(grid);
+  /** The typed size of the grid counts, and the pattern is carried over like this. */
+  resize(grid: Grid, carry: Carry, label: string): void {
+    this.gridWish.set({ grid, carry });
     this.settle(label);
+  }
+
+  /** The typed size of the grid is given up. */
+  leaveSize(): void {
+    this.gridWish.set(null);
   }
 
   /** Takes back what was typed and did not hold together. */
@@ -77,10 +87,10 @@ export class LayoutProposal {
 
   private changes(layout: Layout): Change[] {
     const wishes = this.wishes();
-    const grid = this.gridWish();
+    const wish = this.gridWish();
     const paths = Object.keys(wishes) as FieldPath[];
     return [
-      ...madeChanges([grid && resizeChange(layout, grid)]),
+      ...madeChanges([wish && resizeChange(layout, wish.grid, wish.carry)]),
       ...madeChanges(paths.map((path) => changeOf(layout, path, wishes))),
     ];
   }

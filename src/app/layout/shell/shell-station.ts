@@ -13,6 +13,7 @@ import { LengthField } from '../../drawing/length-field';
 import { PictureView, type PictureMaker } from '../../drawing/picture';
 import { ringPicture } from '../../drawing/ring-picture';
 import { stavePicture } from '../../drawing/stave-picture';
+import { askCarry } from '../carry/ask-carry';
 import { fieldName } from '../field-names';
 import { Findings } from '../findings';
 import { LayoutProposal } from '../layout-proposal';
@@ -102,8 +103,11 @@ export class ShellStation {
     this.proposal.preview(this.gridWith(part, count));
   }
 
-  protected resize(part: 'staves' | 'courses', count: number): void {
-    this.proposal.resize(this.gridWith(part, count), `Set the number of ${part}`);
+  protected async resize(part: 'staves' | 'courses', count: number): Promise<void> {
+    const grid = this.gridWith(part, count);
+    const carry = await askCarry(this.dialogs, this.store.layout(), grid);
+    if (carry === null) this.proposal.leaveSize();
+    else this.proposal.resize(grid, carry, `Set the number of ${part}`);
   }
 
   protected showIn(unit: LengthUnit): void {

@@ -1,9 +1,14 @@
 import { Component, computed, inject, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { MAT_DIALOG_DATA, MatDialogModule, MatDialogRef } from '@angular/material/dialog';
+import {
+  MAT_DIALOG_DATA,
+  MatDialog,
+  MatDialogModule,
+  MatDialogRef,
+} from '@angular/material/dialog';
 import { applyPatch, fieldChange } from '@shared/layout/patch';
 import { problemsOf } from '@shared/layout/consistency';
-import { resizeChange } from '@shared/layout/carry';
+import { resizeChange, type Carry } from '@shared/layout/carry';
 import { BOUNDS } from '@shared/layout/schema';
 import {
   ringsOfStaves,
@@ -15,6 +20,7 @@ import { ChoiceBar, type Choice } from '../../drawing/choice-bar';
 import { CountField } from '../../drawing/count-field';
 import { LengthField } from '../../drawing/length-field';
 import { LengthPipe } from '../../platform/length-pipe';
+import { askCarry } from '../carry/ask-carry';
 import { madeChanges } from '../draft';
 import { fieldName } from '../field-names';
 import type { LayoutStore } from '../layout-store';
@@ -36,6 +42,7 @@ const GIVEN: readonly Choice<Given>[] = [
 export class WishedDiameterDialog {
   private readonly store = inject<LayoutStore>(MAT_DIALOG_DATA);
   private readonly dialog = inject<MatDialogRef<WishedDiameterDialog>>(MatDialogRef);
+  private readonly dialogs = inject(MatDialog);
   private readonly shell = this.store.layout().shell;
 
   protected readonly choices = GIVEN;
@@ -55,7 +62,7 @@ export class WishedDiameterDialog {
   protected readonly taken = computed(() => Math.min(this.picked(), this.rings().length - 1));
   private readonly patch = computed(() => {
     const ring = this.rings()[this.taken()];
-    return ring ? this.patchTo(ring) : [];
+    return ring ? this.patchTo(ring, 'keep') : [];
   });
   /** Why the ring picked cannot be taken, or null. */
   protected readonly problem = computed(() => {
@@ -67,8 +74,14 @@ export class WishedDiameterDialog {
     this.picked.set(index);
   }
 
-  protected take(): void {
-    this.store.edit('Start from a wished diameter', ...this.patch());
+  protected async take(): Promise<void> {
+    const ring = this.rings()[this.taken()];
+    if (!ring) return;
+    const layout = this.store.layout();
+    const { courses } = layout.shell;
+    const carry = await askCarry(this.dialogs, layout, { staves: ring.staves, courses });
+    if (carry === null) return;
+    this.store.edit('Start from a wished diameter', ...this.patchTo(ring, carry));
     this.dialog.close();
   }
 
@@ -84,11 +97,11 @@ export class WishedDiameterDialog {
     };
   }
 
-  private patchTo({ staves, tileWidth, boardThickness }: RingProposal) {
+  private patchTo({ staves, tileWidth, boardThickness }: RingProposal, carry: Carry) {
     const layout = this.store.layout();
     const { outerDiameter, wall } = this.wish();
     return madeChanges([
-      resizeChange(layout, { staves, courses: layout.shell.courses }),
+      resizeChange(layout, { staves, courses: layout.shell.courses }, carry),
       fieldChange(layout, 'shell.tileWidth', tileWidth),
       fieldChange(layout, 'shell.finishedOuterDiameter', outerDiameter),
       fieldChange(layout, 'shell.finishedInnerDiameter', outerDiameter - 2 * wall),
