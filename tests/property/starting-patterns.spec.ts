@@ -80,7 +80,7 @@ describe('every starting pattern', () => {
         const laid = layStartingPattern(pattern, grid);
         if (laid.meets) return;
         for (const offer of laid.offers) {
-          const offered = { ...pattern, [laid.field]: offer } as StartingPattern;
+          const offered = { ...pattern, [laid.field]: offer };
           expect(patternProblems(offered, WOODS)).toEqual([]);
           expect(layStartingPattern(offered, grid).meets).toBe(true);
         }

@@ -70,16 +70,32 @@ export function layHelix(pattern: Helix, grid: Grid): LaidPattern {
 /** Diamonds standing on their points; meets when their width divides the staves. */
 export function layDiamonds(pattern: Diamonds, grid: Grid): LaidPattern {
   const { ground, diamond, staves, courses, drawn } = pattern;
+  const laid = drawn === 'filled' ? isInDiamond : isOnDiamond;
   const cells = filled(grid, (stave, course) => {
-    const across = Math.abs(modulo(stave, staves) + 0.5 - staves / 2) / (staves / 2);
-    const up = Math.abs(modulo(course, courses) + 0.5 - courses / 2) / (courses / 2);
-    const from = across + up;
-    // one tile is worth this much of the way from the middle to the edge
-    const rim = 2 / Math.max(staves, courses);
-    const inside = from <= 1 + rim / 4;
-    return inside && (drawn === 'filled' || from > 1 - rim + 1e-9) ? diamond : ground;
+    const [across, up] = [modulo(stave, staves), modulo(course, courses)];
+    return laid(pattern, across, up) ? diamond : ground;
   });
   return dividing(grid, staves, 'Diamonds', cells);
+}
+
+/** Each course of a diamond is as wide as its sides leave it, to the nearest width that stays in the middle. */
+function isInDiamond({ staves, courses }: Diamonds, across: number, up: number): boolean {
+  if (up < 0 || up >= courses) return false;
+  const fromMiddle = Math.abs(up + 0.5 - courses / 2) / (courses / 2);
+  const narrowest = staves % 2 === 0 ? 2 : 1;
+  const steps = Math.max(0, Math.round(((1 - fromMiddle) * staves - narrowest) / 2));
+  return Math.abs(across + 0.5 - staves / 2) < steps + narrowest / 2;
+}
+
+/** True for the tiles of a diamond that have a neighbour outside it. */
+function isOnDiamond(diamond: Diamonds, across: number, up: number): boolean {
+  const inside = (a: number, u: number) => isInDiamond(diamond, a, u);
+  const surrounded =
+    inside(across - 1, up) &&
+    inside(across + 1, up) &&
+    inside(across, up - 1) &&
+    inside(across, up + 1);
+  return inside(across, up) && !surrounded;
 }
 
 /** Stripes that rise and fall; meets when the crests divide the staves. */

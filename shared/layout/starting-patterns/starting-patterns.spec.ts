@@ -3,7 +3,7 @@ import { countWoods } from '../cells';
 import { patternProblems } from './bounds';
 import { firstPatterns } from './first-pattern';
 import { layStartingPattern } from './lay-pattern';
-import type { StartingPattern } from './starting-pattern';
+import type { Diamonds, StartingPattern } from './starting-pattern';
 
 const GRID = { staves: 32, courses: 9 };
 const TWO = [
@@ -93,6 +93,50 @@ describe('a helix', () => {
   it('offers leads near the wished one, however steep it is', () => {
     const laid = layStartingPattern({ ...helix, lead: 101 }, GRID);
     expect(laid).toMatchObject({ meets: false, offers: [100, 104, 96, 108, 92] });
+  });
+});
+
+describe('diamonds', () => {
+  const drawn = (pattern: Omit<Diamonds, 'kind' | 'ground' | 'diamond'>): string[] => {
+    const grid = { staves: pattern.staves, courses: pattern.courses };
+    const { cells } = layStartingPattern(
+      { kind: 'diamonds', ground: 0, diamond: 1, ...pattern },
+      grid,
+    );
+    return Array.from({ length: grid.courses }, (_, course) =>
+      [...cells.subarray(course * grid.staves, (course + 1) * grid.staves)].join(''),
+    );
+  };
+
+  it('stand on their points, filled', () => {
+    expect(drawn({ staves: 6, courses: 6, drawn: 'filled' })).toEqual([
+      '001100',
+      '011110',
+      '111111',
+      '111111',
+      '011110',
+      '001100',
+    ]);
+  });
+
+  it('have an outline without gaps, also where they are much higher than wide', () => {
+    expect(drawn({ staves: 4, courses: 8, drawn: 'outline' })).toEqual([
+      '0110',
+      '0110',
+      '0110',
+      '1001',
+      '1001',
+      '0110',
+      '0110',
+      '0110',
+    ]);
+    expect(drawn({ staves: 5, courses: 5, drawn: 'outline' })).toEqual([
+      '00100',
+      '01010',
+      '10001',
+      '01010',
+      '00100',
+    ]);
   });
 });
 
