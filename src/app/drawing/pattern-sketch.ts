@@ -16,7 +16,10 @@ const JOINTS_FROM = 8;
     :host {
       display: block;
     }
+    /* the theme's colours, to be read back as the canvas takes them */
     canvas {
+      color: var(--teal);
+      background: var(--paper);
       display: block;
       max-width: 100%;
       max-height: var(--sketch-height, 220px);
@@ -57,11 +60,11 @@ export class PatternSketch {
     for (let x = 0; x < width; x += oneTurn) context.drawImage(tiles, x, 0, oneTurn, height);
     if (tile >= JOINTS_FROM) paintJoints(context, tile, height / courses);
     const look = getComputedStyle(context.canvas);
-    context.globalAlpha = 0.4;
-    context.fillStyle = look.getPropertyValue('--paper');
+    context.globalAlpha = 0.45;
+    context.fillStyle = look.backgroundColor;
     context.fillRect(oneTurn, 0, width, height);
     context.globalAlpha = 1;
-    context.fillStyle = look.getPropertyValue('--teal');
+    context.fillStyle = look.color;
     for (let x = 0; x <= width; x += oneTurn) context.fillRect(x - 2, 0, 4, height);
   }
 }

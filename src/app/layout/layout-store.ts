@@ -152,6 +152,8 @@ export class LayoutStore implements OnDestroy {
     keepVersions: computed(() => this.session.may('keep-versions')),
     exportBundle: computed(() => this.session.may('export-bundle')),
   };
+  /** True from press to release: nothing else may be done meanwhile. */
+  readonly gestureOpen = this.underHand.asReadonly();
   readonly undoLabel = this.history.undoLabel;
   readonly redoLabel = this.history.redoLabel;
   readonly canUndo = computed(() => !this.underHand() && this.undoLabel() !== null);

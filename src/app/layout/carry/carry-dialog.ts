@@ -46,7 +46,7 @@ export interface CarryQuestion {
       <p>Undo brings the size and every tile back in one step.</p>
     </mat-dialog-content>
     <mat-dialog-actions align="end">
-      <button matButton type="button" mat-dialog-close>Leave the size</button>
+      <button matButton type="button" [mat-dialog-close]="null">Leave the size</button>
       <button matButton="filled" type="button" [mat-dialog-close]="chosen()">
         Change the size
       </button>

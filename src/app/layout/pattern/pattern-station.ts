@@ -26,6 +26,7 @@ import { SentenceBar } from './sentence-bar/sentence-bar';
 import { inSentence } from './sentence-words';
 import { PatternSide } from './side/pattern-side';
 import { tileWords } from './spoken';
+import { WholePattern } from './whole/whole-pattern';
 import { RemoveWoodDialog, type RemoveWoodQuestion } from './wood-tray/remove-wood-dialog';
 import { WoodDialog, type WoodQuestion } from './wood-tray/wood-dialog';
 import { WoodTray } from './wood-tray/wood-tray';
@@ -36,7 +37,16 @@ const LAYING_FROM = '(min-width: 768px)';
 /** The pattern: the unrolled shell, the sentence that says what a touch does, the woods, and what it comes to. */
 @Component({
   selector: 'sl-pattern-station',
-  imports: [Icon, MatButton, PatternCanvas, PatternSide, RoundPanel, SentenceBar, WoodTray],
+  imports: [
+    Icon,
+    MatButton,
+    PatternCanvas,
+    PatternSide,
+    RoundPanel,
+    SentenceBar,
+    WholePattern,
+    WoodTray,
+  ],
   providers: [PatternTool, PatternHand],
   templateUrl: './pattern-station.html',
   styleUrl: './pattern-station.scss',

@@ -3,14 +3,12 @@ import { Component, computed, inject } from '@angular/core';
 import { EXTENTS } from '@shared/layout/extent';
 import { AT_THE_END, MIRRORS } from '@shared/layout/repeats';
 import { LayoutStore } from '../../layout-store';
-import { figuresOf } from '../grain/wood-figure';
 import { PatternTool } from '../pattern-tool';
 import {
   atTheEndWords,
   COPY_EXTENTS,
   COPY_WORDS,
   EXTENT_WORDS,
-  inSentence,
   MIRROR_WORDS,
   sizeWords,
   stepWords,
@@ -19,7 +17,8 @@ import {
   VERB_WORDS,
   VERBS,
 } from '../sentence-words';
-import { WordChoice, type WordOption } from './word-choice';
+import { woodOptions } from './wood-options';
+import { WordChoice } from './word-choice';
 
 /** Says in plain words what the next touch will do; every blue word opens its choices. */
 @Component({
@@ -109,13 +108,7 @@ export class SentenceBar {
   private readonly store = inject(LayoutStore);
   protected readonly tool = inject(PatternTool);
 
-  protected readonly woods = computed<WordOption<number>[]>(() => {
-    const figures = figuresOf(this.store.woods());
-    return this.store.woods().map(({ name, colour }, value) => {
-      const figure = figures[value];
-      return { value, words: inSentence(name), ...(figure && { wood: { colour, figure } }) };
-    });
-  });
+  protected readonly woods = computed(() => woodOptions(this.store.woods()));
   protected readonly times = computed(() =>
     this.tool.timesOffered().map((value) => ({ value, words: timesWords(value) })),
   );

@@ -26,6 +26,7 @@ const COUNT_REST_MS = 300;
         />
       }
     </section>
+    <ng-content />
     <section>
       <h2>To cut</h2>
       <p><sl-figure-text [text]="toCut()" /></p>

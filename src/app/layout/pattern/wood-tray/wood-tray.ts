@@ -9,6 +9,7 @@ import { LayoutStore } from '../../layout-store';
 import { figuresOf, type WoodFigure } from '../grain/wood-figure';
 import { PatternTool } from '../pattern-tool';
 import { tilesWords } from '../sentence-words';
+import { shareWords } from './share-words';
 import { WoodStrip } from './wood-strip';
 
 export interface TrayWood {
@@ -16,6 +17,7 @@ export interface TrayWood {
   readonly wood: Wood;
   readonly figure: WoodFigure;
   readonly tiles: string;
+  readonly share: string;
 }
 
 /** The woods along the bottom, each as a strip of itself: pressing one takes it into the hand. */
@@ -44,6 +46,7 @@ export class WoodTray {
       wood,
       figure: figures[index] ?? { mark: 'plain', density: 2 },
       tiles: tilesWords(counts[index] ?? 0),
+      share: shareWords(counts[index] ?? 0, this.store.cells().length),
     }));
   });
 }
