@@ -43,8 +43,8 @@ export default defineConfig({
           name: 'api',
           include: ['tests/api/**/*.spec.ts'],
           globalSetup: ['tests/database-setup.ts'],
-          testTimeout: 30_000,
-          hookTimeout: 30_000,
+          testTimeout: 90_000,
+          hookTimeout: 90_000,
         },
       },
       {

@@ -9,6 +9,7 @@ import { createLogger } from './http/request-log';
 
 /** Requests still running when the server is asked to end get this long. */
 const LAST_REQUESTS_MS = 10_000;
+const IDLE_EVERY_MS = 200;
 
 function start(config: Config): void {
   const logger = createLogger(config.logLevel);
@@ -38,7 +39,8 @@ function start(config: Config): void {
       void open.close().finally(() => process.exit(0));
     });
     void live.close();
-    server.closeIdleConnections();
+    // one that was still being answered a moment ago is idle a moment later
+    setInterval(() => server.closeIdleConnections(), IDLE_EVERY_MS).unref();
     setTimeout(() => server.closeAllConnections(), LAST_REQUESTS_MS).unref();
   };
   process.once('SIGTERM', end);
