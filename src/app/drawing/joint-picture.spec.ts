@@ -80,3 +80,13 @@ test('a large tile with a small joint is cut off at the window, not shrunk away'
   expect(corner.x).toBeGreaterThan(size.width);
   expect(tip.y).toBeGreaterThan(0);
 });
+
+test('a wave has no mouth: a cutter that fits its arcs gets in, however wide the drawing makes its neck', () => {
+  const wave = { profile: 'round', headRadius: 4, filletRadius: 4, reach: 6 } as const;
+  const waves = { ...withCutter(8), joint: { ...layout.joint, courseJoint: wave } };
+  const { profile } = jointFrame(waves, 'courseJoint', size);
+  expect(profile.neck + waves.joint.clearance).toBeLessThan(8);
+  expect(textsOf(jointPicture(waves, 'courseJoint', 'mm', size).marks)).not.toContain(
+    'cutter does not get in',
+  );
+});

@@ -2,6 +2,7 @@
  * Tab and socket drawn apart at large scale: the very outlines that are cut, with the cutter standing in
  * the tight places.
  */
+import { mouthOf } from '@shared/joint/edge-profile';
 import type { Layout } from '@shared/layout/schema';
 import { formatLength, formatLengthFigure } from '@shared/units/format';
 import type { LengthUnit } from '@shared/units/length';
@@ -221,7 +222,9 @@ function socketCutterMarks({ frame, layout, socketWood }: Drawing): Mark[] {
   const { diameter } = layout.cutter;
   const place = placeIn(frame.socket, diameter);
   if (!place) return [];
-  const fits = place.room >= -1e-6 && mouthOf(frame, layout) >= diameter;
+  // a wave has no mouth to get through
+  const mouth = mouthOf(layout.joint[frame.joint], layout.joint.clearance) ?? Infinity;
+  const fits = place.room >= -1e-6 && mouth >= diameter - 1e-6;
   const centre = onScreen(frame.socket.view, place.centre);
   const beside = frame.point(
     frame.profile.headWidth / 2 + 0.16 * frame.profile.reach,
@@ -253,8 +256,4 @@ function socketWords(cutter: 'fits' | 'stuck', { joint, window }: JointFrame): s
 function placeIn(piece: JointPiece, diameter: number): CutterPlace | null {
   const index = insideArcs(piece.outline).at(-1);
   return index === undefined ? null : cutterPlace(piece.outline, index, diameter);
-}
-
-function mouthOf({ profile }: JointFrame, { joint }: Layout): number {
-  return profile.neck + joint.clearance;
 }
