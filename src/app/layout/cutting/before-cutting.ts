@@ -4,6 +4,7 @@ import { FigureText } from '../../drawing/figure-text';
 import { Icon } from '../../drawing/icon';
 import { Lamp } from '../../drawing/lamp';
 import { LayoutStore } from '../layout-store';
+import { STATIONS } from '../stations';
 import { worstFirst } from './worst-first';
 
 /** Every check of the draft with its lamp, worst first; a check opens on its reason and its remedy. */
@@ -28,7 +29,7 @@ import { worstFirst } from './worst-first';
             @if (check.remedy !== '') {
               <p><sl-figure-text [text]="check.remedy" /></p>
               <a [routerLink]="['..', check.station]">
-                Mend it at the {{ check.station === 'shell' ? 'Shell' : 'Joint' }} station
+                Mend it at the {{ check.stationName }} station
               </a>
             }
           </div>
@@ -40,7 +41,12 @@ import { worstFirst } from './worst-first';
 })
 export class BeforeCutting {
   private readonly store = inject(LayoutStore);
-  protected readonly checks = computed(() => worstFirst(this.store.checks()));
+  protected readonly checks = computed(() =>
+    worstFirst(this.store.checks()).map((check) => ({
+      ...check,
+      stationName: STATIONS.find(({ path }) => path === check.station)?.name,
+    })),
+  );
   protected readonly verdict = computed(() => {
     const stops = this.checks().filter((check) => check.result === 'stop').length;
     const cautions = this.checks().filter((check) => check.result === 'caution').length;
