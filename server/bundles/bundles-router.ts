@@ -1,9 +1,9 @@
 import type { Database } from '@drizzle/database';
 import { buildBundle, bundleZip } from '@exports/bundle';
+import { layoutFileName } from '@shared/layout/file-name';
 import { API_ROUTES } from '../api-routes';
 import { refusalWith } from '../http/errors';
 import type { RouteMount } from '../http/route';
-import { layoutFileName } from '../layouts/file-name';
 import { versionNumbered } from '../versions/version-numbered';
 import { recordExport } from './bundle-exports-store';
 

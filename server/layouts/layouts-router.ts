@@ -1,9 +1,9 @@
 import type { Database } from '@drizzle/database';
 import { layoutFileOf, printLayout } from '@shared/layout/read-layout';
+import { layoutFileName } from '@shared/layout/file-name';
 import { API_ROUTES } from '../api-routes';
 import { notFound } from '../http/errors';
 import type { RouteMount } from '../http/route';
-import { layoutFileName } from './file-name';
 import { findDraft, findLastVersion } from './layouts-store';
 import { saveEdit } from './save-edit';
 

@@ -1,9 +1,9 @@
 import type { Database } from '@drizzle/database';
 import { layoutFileOf, printLayout } from '@shared/layout/read-layout';
+import { layoutFileName } from '@shared/layout/file-name';
 import { API_ROUTES } from '../api-routes';
 import { notFound } from '../http/errors';
 import type { RouteMount } from '../http/route';
-import { layoutFileName } from '../layouts/file-name';
 import { isLayoutOf } from '../layouts/layouts-store';
 import { keepVersion, restoreVersion } from './keep-version';
 import { versionNumbered } from './version-numbered';

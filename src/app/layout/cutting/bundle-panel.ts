@@ -4,6 +4,7 @@ import { MatProgressBar } from '@angular/material/progress-bar';
 import type { BundleRequest } from '@shared/api/bundle';
 import { runChecks } from '@shared/checks/run-checks';
 import { compareLayouts } from '@shared/layout/comparison';
+import { layoutFileName } from '@shared/layout/file-name';
 import { readLayout } from '@shared/layout/read-layout';
 import { formatLength } from '@shared/units/format';
 import type { LengthUnit } from '@shared/units/length';
@@ -16,7 +17,6 @@ import { KeepVersion } from '../keep-version';
 import { LayoutStore } from '../layout-store';
 import { VersionsApi } from '../versions-api';
 import { BundleDownload } from './bundle-download';
-import { bundleName } from './bundle-name';
 import { BundleProgress } from './bundle-progress';
 import { StoppedVersion } from './stopped-version';
 
@@ -127,12 +127,12 @@ export class BundlePanel {
 
   /** Downloads the chosen version; with a reason when it goes on in spite of a stop. */
   protected start(override?: BundleRequest['override']): void {
-    const [opened, version] = [this.store.opened(), this.number()];
-    if (!opened || version === null || this.busy()) return;
+    const [opened, version, kept] = [this.store.opened(), this.number(), this.kept()];
+    if (!opened || version === null || !kept || this.busy()) return;
     this.download.start({
       layoutId: opened.id,
       version,
-      fileName: bundleName(opened.commission.title, version),
+      fileName: layoutFileName(kept.name, `-v${version}.zip`),
       request: {
         dxf: this.dxf(),
         unit: this.unit(),
