@@ -1,6 +1,7 @@
 import { HttpClient, type HttpResponse } from '@angular/common/http';
 import { DOCUMENT, inject, Injectable } from '@angular/core';
 import { firstValueFrom } from 'rxjs';
+import { saveFile } from './save-file';
 
 /** Fetches files through HttpClient, so that a refusal comes out as a sentence instead of a broken file. */
 @Injectable({ providedIn: 'root' })
@@ -14,20 +15,10 @@ export class Downloads {
     this.save(await firstValueFrom(answer), name);
   }
 
-  /** The same for a POST with a JSON body. */
-  async post(url: string, body: object, name: string): Promise<void> {
-    const answer = this.http.post(url, body, { responseType: 'blob', observe: 'response' });
-    this.save(await firstValueFrom(answer), name);
-  }
-
   private save(answer: HttpResponse<Blob>, name: string): void {
     if (answer.body === null) return;
-    const address = URL.createObjectURL(answer.body);
-    const link = this.document.createElement('a');
-    link.href = address;
-    link.download = fileNameIn(answer.headers.get('Content-Disposition')) ?? name;
-    link.click();
-    URL.revokeObjectURL(address);
+    const given = fileNameIn(answer.headers.get('Content-Disposition'));
+    saveFile(this.document, answer.body, given ?? name);
   }
 }
 
