@@ -1,3 +1,4 @@
+import { luminanceOf } from '@shared/wood/luminance';
 import { printDecimal } from '../decimal';
 import { element, type Markup } from './xml';
 
@@ -23,13 +24,5 @@ export function faceDownMark(core: number, ink: string): Markup {
 
 /** Black or white, whichever is read better on a colour "#RRGGBB" (relative luminance, WCAG 2.2). */
 export function inkOn(colour: string): string {
-  const [red = 0, green = 0, blue = 0] = [1, 3, 5].map((start) =>
-    linear(Number.parseInt(colour.slice(start, start + 2), 16) / 255),
-  );
-  const luminance = 0.2126 * red + 0.7152 * green + 0.0722 * blue;
-  return luminance > 0.179 ? '#000000' : '#ffffff';
-}
-
-function linear(channel: number): number {
-  return channel <= 0.04045 ? channel / 12.92 : ((channel + 0.055) / 1.055) ** 2.4;
+  return luminanceOf(colour) > 0.179 ? '#000000' : '#ffffff';
 }

@@ -5,6 +5,7 @@
  */
 import type { Segment } from '@shared/geometry/segment';
 import type { Millimetres, PointMm } from '@shared/units/length';
+import { luminanceOf } from '@shared/wood/luminance';
 
 /** A point of the picture, y down. */
 export interface PixelPoint {
@@ -134,10 +135,5 @@ export function circleMark(view: View, centre: PointMm, radius: Millimetres, loo
 
 /** Whether words on this colour ("#RRGGBB") are read better in dark or in light ink (relative luminance, WCAG 2.2). */
 export function inkOn(colour: string): 'on-dark' | 'on-light' {
-  const channel = (at: number) => {
-    const share = parseInt(colour.slice(at, at + 2), 16) / 255;
-    return share <= 0.04045 ? share / 12.92 : ((share + 0.055) / 1.055) ** 2.4;
-  };
-  const luminance = 0.2126 * channel(1) + 0.7152 * channel(3) + 0.0722 * channel(5);
-  return luminance < 0.24 ? 'on-dark' : 'on-light';
+  return luminanceOf(colour) < 0.24 ? 'on-dark' : 'on-light';
 }
