@@ -2,7 +2,7 @@ import { Component } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { MatDialogModule } from '@angular/material/dialog';
 
-/** Leaving would lose edits the server does not have: asks first. */
+/** Edits the server does not have would be left behind in this browser: asks first. */
 @Component({
   selector: 'sl-leave-dialog',
   imports: [MatButton, MatDialogModule],
@@ -10,12 +10,12 @@ import { MatDialogModule } from '@angular/material/dialog';
     <h2 mat-dialog-title>Some of your work is not saved</h2>
     <mat-dialog-content>
       <p>
-        The last changes could not be sent to the server. Stay, and they are kept and tried again;
-        leave, and they are lost.
+        The last changes could not be sent to the server. Stay, and they are tried again; leave, and
+        they wait in this browser until you open the layout here again.
       </p>
     </mat-dialog-content>
     <mat-dialog-actions align="end">
-      <button matButton type="button" [mat-dialog-close]="true">Leave and lose them</button>
+      <button matButton type="button" [mat-dialog-close]="true">Leave them here</button>
       <button matButton="filled" type="button" [mat-dialog-close]="false" cdkFocusInitial>
         Stay
       </button>
