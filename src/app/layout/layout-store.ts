@@ -360,7 +360,7 @@ export class LayoutStore implements OnDestroy {
     if (!opened) return { kind: 'done' };
     this.draft.set(withSave(this.openDraft(), crypto.randomUUID()));
     const save = this.openDraft().inFlight;
-    if (!save) return { kind: 'done' };
+    if (!save) return { kind: 'not-yet' };
     try {
       this.accept(save, await this.api.save(opened.id, wireEdit(save), way));
       return { kind: 'done' };

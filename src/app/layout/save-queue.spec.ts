@@ -121,3 +121,16 @@ test('flushing ends when a save fails', async () => {
   expect(queue.state().kind).toBe('failed');
   queue.stop();
 });
+
+test('hurrying while a gesture is still under the hand gives the page back, and saves after it', async () => {
+  const desk = new Desk({ kind: 'not-yet' }, { kind: 'not-yet' });
+  const queue = new SaveQueue(desk);
+  desk.pending = 1;
+  let ended = false;
+  void queue.flush().then(() => (ended = true));
+  await vi.advanceTimersByTimeAsync(300);
+  expect(ended).toBe(true);
+  expect(queue.state().kind).toBe('waiting');
+  await vi.advanceTimersByTimeAsync(3_000);
+  expect(queue.state().kind).toBe('saved');
+});

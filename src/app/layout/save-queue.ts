@@ -8,6 +8,8 @@ import { signal } from '@angular/core';
 /** How one attempt ended. */
 export type Attempt =
   | { readonly kind: 'done' }
+  /** Nothing could be sent: what is unsaved is still under the hand. */
+  | { readonly kind: 'not-yet' }
   /** Answered, but it has to be sent again at once: somebody else's edit came first. */
   | { readonly kind: 'again' }
   /** Worth trying again later: no connection, or the server is not ready. */
@@ -93,7 +95,8 @@ export class SaveQueue {
         return;
       }
       this.failures = 0;
-      const calm = attempt.kind === 'done' && !this.hurried;
+      // asked again at once, a gesture under the hand would keep the page from ever letting go of it
+      const calm = attempt.kind === 'not-yet' || (attempt.kind === 'done' && !this.hurried);
       if (calm && this.savable.unsaved()) {
         this.wait();
         return;
