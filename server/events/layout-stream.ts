@@ -1,11 +1,14 @@
 import type { Database } from '@drizzle/database';
+import type { RecordedEdit } from '@shared/api/layout';
 import type { Response } from 'express';
 import type { Logger } from 'pino';
-import { editsBetween } from '../layouts/layouts-store';
+import { nextEdits } from '../layouts/layouts-store';
 import { peopleAt, removePresence } from './presence-store';
 
 /** A stream lives this long; the browser then connects again, and its session is looked at anew. */
 const LIFE_MS = 15 * 60_000;
+/** Edits read at once: a browser that has been away long must not bring a whole log into memory. */
+const BATCH = 50;
 /** What the browser waits before it connects again. */
 const RETRY_MS = 1_500;
 
@@ -64,16 +67,14 @@ export class LayoutStream {
   /** Sends the edits recorded since the last one sent. */
   tellEdits(): void {
     this.queue(async () => {
-      const edits = await editsBetween(
-        this.database,
-        this.watcher.layoutId,
-        this.sent,
-        REVISION_MOST,
-      );
-      for (const edit of edits) {
-        this.write('edit', edit, edit.revision);
-        this.sent = edit.revision;
-      }
+      let batch: RecordedEdit[];
+      do {
+        batch = await nextEdits(this.database, this.watcher.layoutId, this.sent, BATCH);
+        for (const edit of batch) {
+          this.write('edit', edit, edit.revision);
+          this.sent = edit.revision;
+        }
+      } while (batch.length === BATCH && this.open);
     });
   }
 
@@ -112,5 +113,3 @@ export class LayoutStream {
     this.response.write(`${head}event: ${event}\ndata: ${JSON.stringify(data)}\n\n`);
   }
 }
-
-const REVISION_MOST = 2 ** 31 - 1;

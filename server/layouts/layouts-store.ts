@@ -4,7 +4,7 @@ import type { OpenLayout, RecordedEdit, WirePatch } from '@shared/api/layout';
 import { summaryOf } from '@shared/api/layout-summary';
 import { layoutFileOf, readLayout } from '@shared/layout/read-layout';
 import type { Layout, LayoutFile } from '@shared/layout/schema';
-import { and, asc, desc, eq, gt, lte } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, lte, type SQL } from 'drizzle-orm';
 
 /** A layout's draft with what stands around it. */
 export interface DraftRow {
@@ -84,6 +84,30 @@ export async function editsBetween(
   after: number,
   upTo: number,
 ): Promise<RecordedEdit[]> {
+  return recordedEdits(
+    queries,
+    and(
+      eq(layoutEdits.layoutId, layoutId),
+      gt(layoutEdits.revision, after),
+      lte(layoutEdits.revision, upTo),
+    ),
+  );
+}
+
+/** The next edits after a revision, in order, at most so many. */
+export async function nextEdits(
+  queries: Queries,
+  layoutId: string,
+  after: number,
+  most: number,
+): Promise<RecordedEdit[]> {
+  return recordedEdits(
+    queries,
+    and(eq(layoutEdits.layoutId, layoutId), gt(layoutEdits.revision, after)),
+  ).limit(most);
+}
+
+function recordedEdits(queries: Queries, which: SQL | undefined) {
   return queries
     .select({
       revision: layoutEdits.revision,
@@ -93,13 +117,7 @@ export async function editsBetween(
     })
     .from(layoutEdits)
     .innerJoin(people, eq(people.id, layoutEdits.authorId))
-    .where(
-      and(
-        eq(layoutEdits.layoutId, layoutId),
-        gt(layoutEdits.revision, after),
-        lte(layoutEdits.revision, upTo),
-      ),
-    )
+    .where(which)
     .orderBy(asc(layoutEdits.revision));
 }
 

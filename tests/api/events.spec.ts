@@ -82,6 +82,17 @@ describe('watching a layout', () => {
     expect(again.edits().map((event) => event.id)).toEqual(['2', '3', '4']);
   });
 
+  it('brings everything to a browser that has been away for long', async () => {
+    const id = await newLayout();
+    for (let base = 0; base < 60; base++) {
+      await designer.patch(`/layouts/${id}`, editOf(base, laid(base)));
+    }
+    const stream = watch(maker, there, id);
+    await stream.until(isRevision(60));
+    const revisions = Array.from({ length: 60 }, (_, i) => String(i + 1));
+    expect(stream.edits().map((event) => event.id)).toEqual(revisions);
+  });
+
   it('goes on when the connection that listens to the database was broken', async () => {
     const id = await newLayout();
     const stream = watch(maker, there, id);
