@@ -39,4 +39,3 @@ export const liveEventSchemas = {
   edit: recordedEditSchema,
   people: z.object({ people: z.array(presentSchema) }),
 } as const;
-export type LivePeople = z.infer<typeof liveEventSchemas.people>;

@@ -9,20 +9,6 @@ export interface Placement {
   readonly yAxis: PointMm;
 }
 
-/** Left and right exchanged. */
-export const MIRRORED: Placement = {
-  origin: { x: 0, y: 0 },
-  xAxis: { x: -1, y: 0 },
-  yAxis: { x: 0, y: 1 },
-};
-
-/** Half a turn in the plane. */
-export const HALF_TURNED: Placement = {
-  origin: { x: 0, y: 0 },
-  xAxis: { x: -1, y: 0 },
-  yAxis: { x: 0, y: -1 },
-};
-
 /** The local point in the outer coordinates. */
 export function placePoint(placement: Placement, point: PointMm): PointMm {
   const { origin, xAxis, yAxis } = placement;
@@ -51,20 +37,4 @@ export function placeSegment(placement: Placement, segment: Segment): Segment {
     startAngle: turn + hand * segment.startAngle,
     sweep: hand * segment.sweep,
   };
-}
-
-/** The same piece run the other way. */
-export function reversed(segment: Segment): Segment {
-  if (segment.kind === 'line') return { kind: 'line', from: segment.to, to: segment.from };
-  return {
-    ...segment,
-    startAngle: segment.startAngle + segment.sweep,
-    sweep: -segment.sweep,
-  };
-}
-
-/** A counter-clockwise chain placed elsewhere, still counter-clockwise when the placement mirrors. */
-export function placeChain(placement: Placement, segments: readonly Segment[]): Segment[] {
-  const placed = segments.map((segment) => placeSegment(placement, segment));
-  return cross(placement.xAxis, placement.yAxis) < 0 ? placed.reverse().map(reversed) : placed;
 }

@@ -25,8 +25,3 @@ function changedTiles(before: Layout, after: Layout): number[] {
     (p) => keyBefore[before.cells[p] ?? 0] !== keyAfter[after.cells[p] ?? 0],
   );
 }
-
-/** True when two layouts are the same document. */
-export function sameLayout(a: Layout, b: Layout): boolean {
-  return patchBetween(a, b).length === 0;
-}
