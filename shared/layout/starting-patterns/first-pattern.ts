@@ -44,7 +44,9 @@ function firstChecker({ staves }: Grid, ground: number, accent: number): Checker
 
 function firstDiamonds(grid: Grid, ground: number, accent: number): Diamonds {
   const staves = slope(grid, 8);
-  const courses = Math.min(staves, Math.max(PATTERN_BOUNDS.diamondCourses.least, grid.courses));
+  // a shell about as high as one diamond shows one whole
+  const fitting = grid.courses <= staves + 1 ? grid.courses : staves;
+  const courses = Math.max(PATTERN_BOUNDS.diamondCourses.least, fitting);
   return { kind: 'diamonds', ground, diamond: accent, staves, courses, drawn: 'filled' };
 }
 

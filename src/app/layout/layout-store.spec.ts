@@ -73,6 +73,19 @@ describe('an open layout', () => {
     await store.open(ID);
   });
 
+  it('asks for no check again while tiles are laid, until other woods lie side by side', () => {
+    const lay = (position: number, wood: number) =>
+      store.edit('Lay', layChange(store.cells(), [position], wood));
+    lay(0, 1);
+    const before = store.checks();
+    expect(before.at(-1)).toMatchObject({ key: 'contrast', station: 'pattern' });
+    lay(40, 1);
+    expect(store.checks()).toBe(before);
+    lay(80, store.woods().length - 1);
+    expect(store.checks()).not.toBe(before);
+    expect(store.checks()[0]).toBe(before[0]);
+  });
+
   afterEach(() => TestBed.resetTestingModule());
 
   it('shows the draft as the server has it', () => {

@@ -14,6 +14,7 @@ const LINES: readonly KeyLine[] = [
   { keys: ['Ctrl C'], does: 'copies the patch, or the tile you stand on' },
   { keys: ['Ctrl V'], does: 'lays the copied patch to the right and up from the tile' },
   { keys: ['1–9', '0'], does: 'take a wood into the hand' },
+  { keys: ['[', ']'], does: 'turn the whole pattern to the left or right by staves' },
   { keys: ['Esc'], does: 'takes back the stroke under the hand, or leaves the tiles' },
   { keys: ['Ctrl Z'], does: 'takes back the last step' },
   { keys: ['Ctrl Shift Z'], does: 'does it again' },

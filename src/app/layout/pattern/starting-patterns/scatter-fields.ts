@@ -57,6 +57,8 @@ import { WoodStrip } from '../wood-tray/wood-strip';
     }
     .seed button {
       margin-top: 8px;
+      padding: 0 16px;
+      white-space: nowrap;
     }
   `,
 })

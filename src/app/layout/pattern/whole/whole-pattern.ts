@@ -69,7 +69,10 @@ export class WholePattern {
   /** The keys [ and ] turn the pattern, except where something is written or a question is open. */
   protected press(event: KeyboardEvent): void {
     const way = KEYS[event.key];
-    if (!way || event.ctrlKey || event.metaKey || this.dialogs.openDialogs.length > 0) return;
+    // on many keyboards the brackets need AltGr, which comes with Ctrl on some systems
+    const commanded = event.ctrlKey || event.metaKey;
+    if (!way || (commanded && !event.getModifierState('AltGraph'))) return;
+    if (this.dialogs.openDialogs.length > 0) return;
     if (event.target instanceof HTMLInputElement) return;
     this.turn(way);
   }
