@@ -32,7 +32,7 @@ export class PatternSketch {
   readonly colours = input.required<readonly string[]>();
   /** What the picture shows, for who cannot see it. */
   readonly label = input.required<string>();
-  /** A second turn, paler, shows how the pattern meets itself. */
+  /** A second turn, fainter, shows how the pattern meets itself. */
   readonly turns = input<1 | 2>(1);
   /** Height of a tile over its width. */
   readonly proportion = input(1);

@@ -1,9 +1,9 @@
 import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import type { Edit, EditSaved, OpenLayout } from '@shared/api/layout';
+import { resizeChange } from '@shared/layout/carry';
 import { fieldChange, layChange } from '@shared/layout/patch';
 import { layoutFileOf } from '@shared/layout/read-layout';
-import { resizeChange } from '@shared/layout/carry';
 import type { Layout } from '@shared/layout/schema';
 import { startingLayout } from '@shared/layout/starting-layout';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
@@ -11,6 +11,7 @@ import { ApiFailure } from '../platform/api-problem';
 import { SessionStore } from '../platform/session-store';
 import { LayoutApi } from './layout-api';
 import { LayoutStore, type Applied } from './layout-store';
+import { LiveEvents } from './live-events';
 
 const ID = '7b0c1c50-0c54-4a63-9f39-3c5a5f3a1d11';
 const plain = startingLayout('Lantern');
@@ -64,6 +65,7 @@ describe('an open layout', () => {
       providers: [
         LayoutStore,
         { provide: LayoutApi, useValue: desk },
+        { provide: LiveEvents, useValue: { people: signal([]), watch: () => undefined } },
         { provide: SessionStore, useValue: { person, may: () => true } },
       ],
     });
