@@ -1,5 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { found } from './one-check.fixture';
+import { checkContext } from './context';
+import { found, lantern } from './one-check.fixture';
+import { reachIn } from './reach-in';
 
 /** Wide fillets behind a slim neck: only the mouth is in the cutter's way. */
 const slim = { profile: 'round', headRadius: 3.6, filletRadius: 2.4, reach: 10 } as const;
@@ -22,6 +24,17 @@ describe('room for the cutter', () => {
       'The narrowest socket mouth, on the stave joint, is 4.26 mm wide; the cutter is 4.7 mm.',
     );
     expect(result.remedy).toBe('Widen the neck, or take a 4.264 mm cutter.');
+  });
+
+  it('is a stop when the path crosses itself elsewhere, however wide the mouths', () => {
+    const context = checkContext(lantern(), {});
+    const fit = { ...context.fit, crossingAt: { x: 0, y: 0 }, largestCutter: 3 };
+    const result = reachIn({ ...context, fit });
+    expect(result.result).toBe('stop');
+    expect(result.finding).toBe(
+      'Between two edges of a piece there is less room than a 3.175 mm cutter needs.',
+    );
+    expect(result.remedy).toBe('Take a larger tile or a shorter reach, or take a 3 mm cutter.');
   });
 
   it('does not look for a mouth where both joints are waves', () => {

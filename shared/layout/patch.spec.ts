@@ -99,6 +99,10 @@ describe('what two patches both touch', () => {
     const resize: Patch = [resizeChange(layout, { staves: 10, courses: 3 })!];
     expect(overlapOf(resize, lay([1], 1))?.grid).toBe(true);
     expect(overlapOf(lay([1], 1), resize)?.grid).toBe(true);
+    const renamed = layout.woods.map((wood) => ({ ...wood, name: `Old ${wood.name}` }));
+    const woods: Patch = [fieldChange(layout, 'woods', renamed)!];
+    expect(overlapOf(resize, woods)?.grid).toBe(true);
+    expect(overlapOf(resize, [fieldChange(layout, 'name', 'Other ring')!])).toBeNull();
   });
 });
 

@@ -5,7 +5,7 @@ export function spareCount(
   count: number,
   build: Pick<Build, 'spareShare' | 'spareMinimum'>,
 ): number {
-  // 0.1 × 30 is 3.0000000000000004: a share that divides must not round up to one more
+  // 0.07 × 100 is 7.000000000000001: a share that divides must not round up to one more
   const share = Math.ceil(Math.round(count * build.spareShare * 1e9) / 1e9);
   return Math.max(share, build.spareMinimum);
 }
