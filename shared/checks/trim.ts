@@ -64,7 +64,7 @@ function spoiledBy(eachEnd: Millimetres, context: CheckContext): string | null {
   const [from, to] = [tileHeight / 2 - head, tileHeight / 2 + head];
   if (eachEnd > from && eachEnd < to) return 'cuts the stave joint of the end tiles';
   const left = eachEnd <= from ? from - eachEnd : greatestTrim(context) - eachEnd;
-  if (left >= webMinimum || (eachEnd >= to && layout.shell.courses === 1)) return null;
+  if (left >= webMinimum) return null;
   const where = eachEnd <= from ? 'beside the stave joint' : 'under the course joint';
   return `leaves only ${length(left)} of wood ${where}`;
 }
