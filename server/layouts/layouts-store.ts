@@ -24,13 +24,18 @@ export async function findDraft(
   return row ? draftOf(row) : null;
 }
 
-/** The same with the layout's row locked until the transaction ends: edits of a layout come one by one. */
+/**
+ * The same with its rows locked until the transaction ends: edits of a layout come one by one, and nobody
+ * archives its commission meanwhile.
+ */
 export async function lockDraft(
   transaction: Transaction,
   workshopId: string,
   layoutId: string,
 ): Promise<DraftRow | null> {
-  const [row] = await draftQuery(transaction, workshopId, layoutId).for('update', { of: layouts });
+  const [row] = await draftQuery(transaction, workshopId, layoutId).for('update', {
+    of: [layouts, commissions],
+  });
   return row ? draftOf(row) : null;
 }
 

@@ -1,7 +1,9 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { randomUUID } from 'node:crypto';
+import { commissions } from '@drizzle/schema/index';
 import { commissionListSchema, commissionSchema } from '@shared/api/commission';
 import { printLayout } from '@shared/layout/read-layout';
+import { eq } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { signedIn, type Browser } from './browser';
 import { commissionTitled, draftOf, editOf, laid, newCommission, problem } from './demonstration';
@@ -173,6 +175,22 @@ describe('an archived commission', () => {
     }
     expect((await owner.patch(path, { archived: false, title: 'Back' })).status).toBe(200);
     expect((await owner.patch(layout, editOf(0, laid(1)))).status).toBe(200);
+  });
+});
+
+describe('a commission that is being archived', () => {
+  it('takes no edit that came in before it was', async () => {
+    const made = await newCommission(owner, 'Archived just now');
+    const edit = await running.open.database.transaction(async (archiving) => {
+      await archiving
+        .update(commissions)
+        .set({ archivedAt: new Date() })
+        .where(eq(commissions.id, made.id));
+      const sent = owner.patch(`/layouts/${made.layoutId}`, editOf(0, laid(1)));
+      await new Promise((resolve) => setTimeout(resolve, 300));
+      return { sent };
+    });
+    expect(problem(await edit.sent, 403).message).toContain('archive');
   });
 });
 
