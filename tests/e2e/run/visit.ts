@@ -33,14 +33,24 @@ export function launchChromium(): Promise<Browser> {
   });
 }
 
+export interface VisitOptions {
+  /** Where the program is served. */
+  readonly address: string;
+  /** Of the window, in CSS pixels. */
+  readonly size?: { readonly width: number; readonly height: number };
+  /** Screen pixels a CSS pixel: 2 for a window that is read at 200 %. */
+  readonly fineness?: number;
+}
+
 /** Opens a window of its own: nobody is signed in. Close it with `visit.context.close()`. */
 export async function openVisit(
   browser: Browser,
-  { address, size = desktop }: { address: string; size?: { width: number; height: number } },
+  { address, size = desktop, fineness = 1 }: VisitOptions,
 ): Promise<Visit> {
   const context = await browser.newContext({
     baseURL: address,
     viewport: size,
+    deviceScaleFactor: fineness,
     hasTouch: size.width < 600,
     acceptDownloads: true,
     reducedMotion: 'reduce',
@@ -57,8 +67,9 @@ export async function openVisit(
   return { page, context, consoleErrors };
 }
 
-/** Keeps a picture of the page as out/screens/NAME.png. */
+/** With PICTURES set, keeps a picture of the page as out/screens/NAME.png for someone to look at. */
 export async function keepScreen(page: Page, name: string): Promise<void> {
+  if (process.env['PICTURES'] === undefined) return;
   const folder = join(projectFolder, 'out', 'screens');
   mkdirSync(folder, { recursive: true });
   await page.screenshot({ path: join(folder, `${name}.png`), animations: 'disabled' });
