@@ -4,7 +4,13 @@ export type StationName = 'Shell' | 'Joint' | 'Pattern' | 'Cutting' | 'Review';
 
 /** What stands around every station of an open layout. */
 export class LayoutPage {
-  constructor(protected readonly page: Page) {}
+  constructor(readonly page: Page) {}
+
+  /** Opens a layout by the address of one of its stations. */
+  async open(address: string): Promise<void> {
+    await this.page.goto(address);
+    await this.pill().waitFor();
+  }
 
   /** Goes to a station and waits until it is there. */
   async goTo(station: StationName): Promise<void> {
@@ -35,11 +41,17 @@ export class LayoutPage {
   }
 
   undoButton(): Locator {
-    return this.page.getByRole('button', { name: /^Undo:/ });
+    return this.page.getByRole('button', { name: 'Undo', exact: true });
   }
 
   redoButton(): Locator {
-    return this.page.getByRole('button', { name: /^Redo:/ });
+    return this.page.getByRole('button', { name: 'Redo', exact: true });
+  }
+
+  /** Asks for the layout as a file. */
+  async downloadFile(): Promise<void> {
+    await this.page.getByRole('button', { name: 'Layout', exact: true }).click();
+    await this.page.getByRole('menuitem', { name: 'Download the layout file' }).click();
   }
 
   /** Opens the dialog that keeps a version. */

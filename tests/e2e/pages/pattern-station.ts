@@ -13,6 +13,13 @@ export class PatternStation extends LayoutPage {
     return this.page.getByRole('application', { name: /^Pattern/ });
   }
 
+  /** Of the canvas, in CSS pixels. */
+  async size(): Promise<{ width: number; height: number }> {
+    const box = await this.canvas().boundingBox();
+    if (!box) throw new Error('the canvas is not on the screen');
+    return box;
+  }
+
   /** Chooses a word of the sentence: what is laid, where, how often. */
   async say(about: 'Wood' | 'Where' | 'Repeated', words: string): Promise<void> {
     await this.page.getByRole('button', { name: new RegExp(`^${about}:`) }).click();
