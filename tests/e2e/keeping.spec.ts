@@ -35,9 +35,20 @@ async function inNewCommission(title: string): Promise<Visit> {
   return visit;
 }
 
-/** Another tab of the same person on the same page. */
-async function secondTab(visit: Visit): Promise<Page> {
+/** Does something while PostgreSQL is away; it is back afterwards, however that went. */
+async function withoutPostgres(work: () => Promise<void>): Promise<void> {
+  await program.stopPostgres();
+  try {
+    await work();
+  } finally {
+    await program.startPostgres();
+  }
+}
+
+/** Another tab of the same person on the same page, which hears nothing of what others do: it grows stale. */
+async function deafTab(visit: Visit): Promise<Page> {
   const page = await visit.context.newPage();
+  await page.route(/\/events\?/, (route) => route.abort());
   await page.goto(visit.page.url());
   await page.getByRole('navigation', { name: 'Stations' }).waitFor();
   return page;
@@ -53,20 +64,18 @@ async function cutOff(page: Page): Promise<() => Promise<void>> {
 it('PostgreSQL stops in the middle: the page says so, keeps the work and saves it when it is back', async () => {
   const { page, context } = await inNewCommission('Through an outage');
   const shell = new ShellStation(page);
-  await program.stopPostgres();
-  await shell.field('Board').fill('16');
-  await shell.trouble().getByText('Not saved.').waitFor();
-  const words = await shell.trouble().innerText();
-  expect(words).toContain('What you did is kept on this page and tried again.');
-  expect(words).not.toMatch(/ECONN|postgres|127\.0\.0\.1|select/i);
-  expect(await shell.pill().innerText()).toBe('not saved');
-  await expectSoundScreen(page, 'not-saved');
-  // work goes on meanwhile
-  await shell.field('Finished height').fill('224');
-  expect(await shell.field('Board').inputValue()).toBe('16');
-
-  await program.startPostgres();
-  await shell.trouble().getByRole('button', { name: 'Try now' }).click();
+  await withoutPostgres(async () => {
+    await shell.field('Board').fill('16');
+    await shell.trouble().getByText('Not saved.').waitFor();
+    const words = await shell.trouble().innerText();
+    expect(words).toContain('What you did is kept on this page and tried again.');
+    expect(words).not.toMatch(/ECONN|postgres|127\.0\.0\.1|select/i);
+    expect(await shell.pill().innerText()).toBe('not saved');
+    await expectSoundScreen(page, 'not-saved');
+    // work goes on meanwhile
+    await shell.field('Finished height').fill('224');
+    expect(await shell.field('Board').inputValue()).toBe('16.00');
+  });
   await shell.saved();
   expect(await shell.trouble().count()).toBe(0);
   await page.reload();
@@ -81,44 +90,47 @@ it('the list of commissions says that the server is away and comes back with it'
   await new SignInPage(page).signIn('bela@quarrylane.example');
   const commissions = new CommissionsPage(page);
   await commissions.enter('Ferry-hall lantern');
-  await program.stopPostgres();
-  await page.getByRole('link', { name: 'Commissions', exact: true }).click();
-  await page.getByRole('heading', { name: 'The commissions could not be fetched' }).waitFor();
-  await expectSoundScreen(page, 'commissions-away');
-  await program.startPostgres();
+  await withoutPostgres(async () => {
+    await page.getByRole('link', { name: 'Commissions', exact: true }).click();
+    await page.getByRole('heading', { name: 'The commissions could not be fetched' }).waitFor();
+    await expectSoundScreen(page, 'commissions-away');
+  });
   await page.getByRole('button', { name: 'Try again' }).click();
   await commissions.row('Ferry-hall lantern').waitFor();
   await context.close();
 });
 
-it('a save that fails is said and tried again by itself', async () => {
+it('a save that fails is tried again with growing pauses, and at once when asked', async () => {
   const { page, context } = await inNewCommission('A short break');
   const shell = new ShellStation(page);
   const callBack = await cutOff(page);
   await shell.field('Board').fill('17');
-  await shell.trouble().getByText('Not saved.').waitFor();
+  await shell.trouble().getByText('again in 2 s').waitFor();
+  await shell.trouble().getByText('again in 8 s').waitFor();
   await callBack();
+  await shell.trouble().getByRole('button', { name: 'Try now' }).click();
   await shell.saved();
   await page.reload();
   await expect.poll(() => shell.field('Board').inputValue()).toBe('17.00');
   await context.close();
 });
 
-it('closing the tab loses nothing: what was acknowledged is on the server, the rest is kept here', async () => {
+it('a tab closed during an outage loses nothing: the server has what it acknowledged, the browser the rest', async () => {
   const { page, context } = await inNewCommission('Closed in a hurry');
   const address = page.url();
   const shell = new ShellStation(page);
   await shell.field('Board').fill('18');
   await shell.saved();
-  await cutOff(page);
-  await shell.field('Finished height').fill('222');
-  await shell.trouble().getByText('Not saved.').waitFor();
-  await page.close({ runBeforeUnload: false });
+  await withoutPostgres(async () => {
+    await shell.field('Finished height').fill('222');
+    await shell.trouble().getByText('Not saved.').waitFor();
+    await page.close();
+  });
 
   const elsewhere = await openVisit(browser, { address: program.address });
   await new SignInPage(elsewhere.page).signIn('bela@quarrylane.example');
-  await elsewhere.page.goto(address);
   const theirs = new ShellStation(elsewhere.page);
+  await theirs.open(address);
   await expect.poll(() => theirs.field('Board').inputValue()).toBe('18.00');
   expect(await theirs.field('Finished height').inputValue()).toBe('228.00');
 
@@ -133,11 +145,22 @@ it('closing the tab loses nothing: what was acknowledged is on the server, the r
   await context.close();
 });
 
-it('two tabs: tiles laid in both come together', async () => {
+it('a tab closed right after the last touch still sends it', async () => {
+  const { page, context } = await inNewCommission('Closed at once');
+  const address = page.url();
+  await new ShellStation(page).field('Board').fill('19');
+  await page.close();
+  const again = new ShellStation(await context.newPage());
+  await again.open(address);
+  await expect.poll(() => again.field('Board').inputValue()).toBe('19.00');
+  await context.close();
+});
+
+it('two tabs, one of them stale: tiles laid in both come together', async () => {
   const visit = await inNewCommission('Laid from two sides');
   const one = new PatternStation(visit.page);
   await one.goTo('Pattern');
-  const other = new PatternStation(await secondTab(visit));
+  const other = new PatternStation(await deafTab(visit));
   const { width, height } = await one.size();
   const callBack = await cutOff(other.page);
   await one.say('Where', 'a course');
@@ -153,11 +176,11 @@ it('two tabs: tiles laid in both come together', async () => {
   await visit.context.close();
 });
 
-it('two tabs: the same field set in both asks which value stays', async () => {
+it('two tabs, one of them stale: the same field set in both asks which value stays', async () => {
   const visit = await inNewCommission('Set from two sides');
   const one = new JointStation(visit.page);
   await one.goTo('Joint');
-  const other = new JointStation(await secondTab(visit));
+  const other = new JointStation(await deafTab(visit));
   const callBack = await cutOff(other.page);
   await one.enter('Flute length', 18);
   await one.saved();

@@ -11,6 +11,7 @@ import { Trouble } from '../drawing/trouble';
 import { BarActions } from '../platform/bar-actions';
 import { BarSlot } from '../platform/bar-slot';
 import { askCarry } from './carry/ask-carry';
+import { SessionStore } from '../platform/session-store';
 import { ContestDialog, type ContestAnswer, type ContestQuestion } from './contest-dialog';
 import { KeepVersion } from './keep-version';
 import { LayoutStore } from './layout-store';
@@ -52,6 +53,7 @@ export class LayoutPage {
   private readonly dialogs = inject(MatDialog);
   private readonly keeping = inject(KeepVersion);
   private readonly slot = inject(BarSlot);
+  private readonly session = inject(SessionStore);
   private readonly live = inject(LiveEvents);
   private asking = false;
   private readonly path = toSignal(
@@ -94,7 +96,8 @@ export class LayoutPage {
 
   /** Before the page is left: everything saved, or the person says that it may be lost. */
   async mayLeave(): Promise<boolean> {
-    if (!this.store.unsaved()) return true;
+    // The session has ended: nothing can be saved before signing in, and the draft is kept in this browser.
+    if (this.session.person() === null || !this.store.unsaved()) return true;
     await this.store.flush();
     if (!this.store.unsaved()) return true;
     const asked = this.dialogs.open<LeaveDialog, undefined, boolean>(LeaveDialog);

@@ -62,7 +62,16 @@ import { checksOf, STATIONS } from './stations';
     }
     @media (max-width: 599px) {
       a {
-        padding: 2px 14px 0;
+        gap: 6px;
+        padding: 2px 10px 0;
+      }
+      /* The stations that do not fit fade out, so that one sees there are more. */
+      nav {
+        mask-image: linear-gradient(to right, #000 calc(100% - 36px), transparent);
+      }
+      nav::after {
+        flex: 0 0 36px;
+        content: '';
       }
     }
   `,
@@ -82,6 +91,6 @@ export class StationsBar {
 
   /** On a narrow screen the stations scroll sideways: the one that is open comes into view. */
   protected reveal(link: HTMLElement): void {
-    link.scrollIntoView({ block: 'nearest', inline: 'nearest' });
+    link.scrollIntoView({ block: 'nearest', inline: 'center' });
   }
 }

@@ -2,7 +2,7 @@ import { LiveAnnouncer } from '@angular/cdk/a11y';
 import { inject, Injectable } from '@angular/core';
 import { MatSnackBar } from '@angular/material/snack-bar';
 
-const SHOWN_MS = 8000;
+const SHOWN = { duration: 8000, horizontalPosition: 'start' } as const;
 
 /** Says things: aloud for screen readers, or in a bar at the bottom for everyone. */
 @Injectable({ providedIn: 'root' })
@@ -17,11 +17,11 @@ export class Announcer {
 
   /** Shows and speaks a sentence. */
   tell(sentence: string): void {
-    this.snackBar.open(sentence, 'Close', { duration: SHOWN_MS });
+    this.snackBar.open(sentence, 'Close', SHOWN);
   }
 
   /** Shows and speaks a sentence with one step to take, such as "Undo". */
   offer(sentence: string, step: string, take: () => void): void {
-    this.snackBar.open(sentence, step, { duration: SHOWN_MS }).onAction().subscribe(take);
+    this.snackBar.open(sentence, step, SHOWN).onAction().subscribe(take);
   }
 }

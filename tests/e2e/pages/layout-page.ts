@@ -1,6 +1,7 @@
 import type { Locator, Page } from 'playwright-core';
 
-export type StationName = 'Shell' | 'Joint' | 'Pattern' | 'Cutting' | 'Review';
+export const STATIONS = ['Shell', 'Joint', 'Pattern', 'Cutting', 'Review'] as const;
+export type StationName = (typeof STATIONS)[number];
 
 /** What stands around every station of an open layout. */
 export class LayoutPage {

@@ -41,7 +41,7 @@ const MOTION_OVER = `document.fonts.ready.then(() => document.getAnimations().ev
   animation.playState !== 'running' || animation.effect.getComputedTiming().endTime === Infinity))`;
 
 /** Waits until nothing moves but what moves for ever, such as a bar of progress. */
-async function untilStill(page: Page): Promise<void> {
+export async function untilStill(page: Page): Promise<void> {
   await page.waitForFunction(MOTION_OVER);
 }
 
