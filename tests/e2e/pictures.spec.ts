@@ -7,6 +7,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { projectFolder } from '../../scripts/project.mjs';
 import { CommissionsPage } from './pages/commissions-page';
 import { LayoutPage } from './pages/layout-page';
+import { PatternStation } from './pages/pattern-station';
 import { SignInPage } from './pages/sign-in-page';
 import { startProgram, type RunningProgram } from './run/running-program';
 import { untilStill } from './run/sound-screen';
@@ -33,7 +34,6 @@ describe.runIf(process.env['PICTURES'] !== undefined)('the pictures of the READM
 
   /** Few colours carry these screens: a palette keeps the files small. */
   async function take(name: string): Promise<void> {
-    await visit.page.mouse.move(0, 0);
     await untilStill(visit.page);
     const path = join(FOLDER, `${name}.png`);
     const picture = await visit.page.screenshot({ animations: 'disabled' });
@@ -47,12 +47,19 @@ describe.runIf(process.env['PICTURES'] !== undefined)('the pictures of the READM
     await new CommissionsPage(visit.page).enter('Ferry-hall lantern');
   });
 
-  it.each(['Shell', 'Joint', 'Pattern', 'Cutting'] as const)(
-    'shows the %s station',
-    async (name) => {
-      await new LayoutPage(visit.page).goTo(name);
-      await visit.page.evaluate('document.activeElement.blur()');
-      await take(name.toLowerCase());
-    },
-  );
+  it('shows the Pattern station with what the next touch will lay', async () => {
+    const pattern = new PatternStation(visit.page);
+    await pattern.goTo('Pattern');
+    await pattern.say('Wood', 'black cherry');
+    await pattern.say('Repeated', '8 times round');
+    const { width, height } = await pattern.size();
+    await pattern.canvas().hover({ position: { x: width * 0.2, y: height * 0.3 } });
+    await take('pattern');
+  });
+
+  it.each(['Shell', 'Joint', 'Cutting'] as const)('shows the %s station', async (name) => {
+    await new LayoutPage(visit.page).goTo(name);
+    await visit.page.evaluate('document.activeElement.blur()');
+    await take(name.toLowerCase());
+  });
 });

@@ -23,6 +23,9 @@ import { STATIONS } from './stations';
     }
   `,
   styles: `
+    :host {
+      display: contents;
+    }
     ul {
       display: flex;
       margin: 0;
