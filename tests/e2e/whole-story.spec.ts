@@ -136,6 +136,10 @@ describe('a shell from the first idea to the machine', () => {
     await expect.poll(walnut).toBe(drawn);
     await pattern.saved();
     await expectSoundScreen(visit.page, 'pattern');
+    await pattern.wrapButton().click();
+    await visit.page.getByRole('button', { name: 'Wrapped', pressed: true }).waitFor();
+    await expectSoundScreen(visit.page, 'pattern-wrapped');
+    await pattern.wrapButton().click();
   });
 
   it('she looks at it in the dark', async () => {

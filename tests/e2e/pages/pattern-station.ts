@@ -42,6 +42,11 @@ export class PatternStation extends LayoutPage {
     await this.page.mouse.up();
   }
 
+  /** Opens and closes the wrapped shell beside the canvas. */
+  wrapButton(): Locator {
+    return this.page.getByRole('button', { name: 'Wrapped', exact: true });
+  }
+
   /** The strip of a wood with how many tiles it fills. */
   wood(name: string): Locator {
     return this.page.getByRole('list', { name: 'Woods' }).getByRole('button', { name });
