@@ -52,8 +52,9 @@ describe.runIf(process.env['PICTURES'] !== undefined)('the pictures of the READM
     await pattern.goTo('Pattern');
     await pattern.say('Wood', 'black cherry');
     await pattern.say('Repeated', '8 times round');
+    await pattern.say('Each step', '1 course up');
     const { width, height } = await pattern.size();
-    await pattern.canvas().hover({ position: { x: width * 0.2, y: height * 0.3 } });
+    await pattern.canvas().hover({ position: { x: width * 0.2, y: height * 0.7 } });
     await take('pattern');
   });
 

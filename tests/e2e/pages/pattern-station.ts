@@ -21,7 +21,7 @@ export class PatternStation extends LayoutPage {
   }
 
   /** Chooses a word of the sentence: what is laid, where, how often. */
-  async say(about: 'Wood' | 'Where' | 'Repeated', words: string): Promise<void> {
+  async say(about: 'Wood' | 'Where' | 'Repeated' | 'Each step', words: string): Promise<void> {
     await this.page.getByRole('button', { name: new RegExp(`^${about}:`) }).click();
     await this.page.getByRole('menuitemradio', { name: words, exact: true }).click();
     await this.page.getByRole('menu').waitFor({ state: 'detached' });

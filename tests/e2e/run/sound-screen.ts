@@ -45,10 +45,18 @@ export async function untilStill(page: Page): Promise<void> {
   await page.waitForFunction(MOTION_OVER);
 }
 
-/** What sticks out of the window sideways, one line an element; empty is good. */
+/** Longer than a page takes to follow a window that has changed its size. */
+const SETTLING_MS = 2_000;
+
+/** What sticks out of the window sideways and stays so, one line an element; empty is good. */
 export async function sidewaysOverflow(page: Page): Promise<string[]> {
   await untilStill(page);
-  return page.evaluate<string[]>(ELEMENTS_OUTSIDE);
+  const began = performance.now();
+  for (;;) {
+    const outside = await page.evaluate<string[]>(ELEMENTS_OUTSIDE);
+    if (outside.length === 0 || performance.now() - began > SETTLING_MS) return outside;
+    await page.evaluate('new Promise((resolve) => requestAnimationFrame(resolve))');
+  }
 }
 
 /**
