@@ -7,6 +7,7 @@ import type { PatternKind } from '@shared/layout/starting-patterns/starting-patt
 import { CountField } from '../../../drawing/count-field';
 import { Announcer } from '../../../platform/announcer';
 import { LayoutStore } from '../../layout-store';
+import { FromPicture } from '../from-picture/from-picture';
 import { PatternTool } from '../pattern-tool';
 import { woodOptions } from '../sentence-bar/wood-options';
 import { WordChoice } from '../sentence-bar/word-choice';
@@ -22,7 +23,7 @@ const KEYS: Partial<Record<string, Way>> = { '[': 'left', ']': 'right' };
 /** What is done to the whole pattern at once, each as one step to undo: laid by name, turned, woods swapped. */
 @Component({
   selector: 'sl-whole-pattern',
-  imports: [CountField, MatButton, WordChoice],
+  imports: [CountField, FromPicture, MatButton, WordChoice],
   templateUrl: './whole-pattern.html',
   styleUrl: './whole-pattern.scss',
   host: { '(document:keydown)': 'press($event)' },
