@@ -16,6 +16,7 @@ import {
   type Viewport,
 } from '../../src/app/layout/pattern/canvas/viewport';
 import type { CanvasBenchPage, DriveFigures } from './canvas-drives';
+import { invertPatch, layChange, type CellsChange, type Change } from '@shared/layout/patch';
 import { startingLayout } from '@shared/layout/starting-layout';
 
 const COLOURS: CanvasColours = {
@@ -138,6 +139,49 @@ function layAt(frame: number): number[] {
   return positions;
 }
 
+/** Nearer in small steps for a second, then further off as long. */
+function zoomAt(frame: number): void {
+  const factor = Math.floor(frame / 30) % 2 === 0 ? 1.03 : 1 / 1.03;
+  view = zoomedAt(view, bounds, { x: size.width / 2, y: size.height / 2 }, factor);
+}
+
+/** One edit: a course laid in another wood, as the store does it, patch and all. */
+function courseChange(frame: number): CellsChange | null {
+  const { staves, courses } = scene.drawing.grid;
+  const first = (frame % courses) * staves;
+  const positions = Array.from({ length: staves }, (_, stave) => first + stave);
+  return layChange(scene.cells, positions, frame % 4);
+}
+
+function withChange(change: Change | undefined): readonly number[] {
+  if (change?.kind !== 'cells') return [];
+  const cells = scene.cells.slice();
+  change.positions.forEach((position, i) => (cells[position] = change.after[i] ?? 0));
+  scene = { ...scene, cells };
+  return change.positions;
+}
+
+let laid: CellsChange | null = null;
+
+/** Lays a course in an even frame and takes it back in an odd one. */
+function courseAt(frame: number): readonly number[] {
+  if (frame % 2 === 0) {
+    laid = courseChange(frame);
+    return withChange(laid ?? undefined);
+  }
+  return withChange(laid ? invertPatch([laid])[0] : undefined);
+}
+
+/** Bytes of script memory in use, after the garbage is collected where the browser lets us ask for it. */
+function memoryInUse(): number {
+  const page = globalThis as unknown as {
+    gc?: () => void;
+    performance: { memory?: { usedJSHeapSize: number } };
+  };
+  page.gc?.();
+  return page.performance.memory?.usedJSHeapSize ?? NaN;
+}
+
 (globalThis as unknown as CanvasBenchPage).canvasBench = {
   async open(staves, courses) {
     clearPage();
@@ -175,6 +219,49 @@ function layAt(frame: number): number[] {
     stage?.strokeDone();
     await settled();
     return figures;
+  },
+  async zoomInAndOut(frames) {
+    const figures = await drive(frames, (frame) => {
+      zoomAt(frame);
+      stage?.setView(view);
+    });
+    await settled();
+    return figures;
+  },
+  async layCourse(frames) {
+    const figures = await drive(frames, (frame) => {
+      stage?.lay(scene, courseAt(frame));
+      stage?.strokeDone();
+    });
+    await settled();
+    return figures;
+  },
+  async edits(count) {
+    const before = memoryInUse();
+    const done: Change[] = [];
+    for (let edit = 0; edit < count; edit++) {
+      const change = courseChange(edit);
+      if (change) done.push(change);
+      stage?.lay(scene, withChange(change ?? undefined));
+      stage?.strokeDone();
+      if (edit % 20 === 0) await nextFrame();
+    }
+    await settled();
+    return memoryInUse() - before;
+  },
+  bareZoom(frames) {
+    showBare();
+    return drive(frames, (frame) => {
+      zoomAt(frame);
+      paintBare();
+    });
+  },
+  bareCourse(frames) {
+    showBare();
+    return drive(frames, (frame) => {
+      courseAt(frame);
+      paintBare();
+    });
   },
   barePan(frames) {
     showBare();

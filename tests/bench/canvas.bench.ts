@@ -1,5 +1,5 @@
 /**
- * The pattern's canvas at 200 × 100 in headless Chromium, all tiles in view and closer up, beside a bare
+ * The pattern's canvas at 200 × 100 and at 32 × 9 in headless Chromium, all tiles in view and closer up, beside a bare
  * canvas that paints the same tiles with the same painter every frame. Frames are what the screen shows;
  * script is what the page's own code took of them (the bare canvas hands much of its work to the browser's
  * painting, which only its frames show).
@@ -8,7 +8,7 @@ import { fileURLToPath } from 'node:url';
 import { build } from 'esbuild';
 import { chromium, type Page } from 'playwright-core';
 import type { BenchRow } from './bench-row';
-import type { CanvasBenchPage, DriveFigures } from './canvas-drives';
+import type { CanvasBench, CanvasBenchPage, DriveFigures } from './canvas-drives';
 
 const CHROMIUM = process.env['CHROMIUM'] ?? '/usr/bin/chromium';
 const CHROMIUM_ARGUMENTS = [
@@ -19,15 +19,18 @@ const CHROMIUM_ARGUMENTS = [
   '--disable-background-networking',
   '--disable-component-update',
   '--disable-sync',
+  '--enable-precise-memory-info',
+  '--js-flags=--expose-gc',
 ];
 
 const STAVES = 200;
 const COURSES = 100;
 const FRAMES = 120;
+const EDITS = 1_000;
 /** The bare canvas is slow enough to be measured in fewer. */
 const BARE_FRAMES = 30;
 
-type Drive = 'pan' | 'paint' | 'barePan' | 'barePaint';
+type Drive = keyof Omit<CanvasBench, 'open' | 'zoom' | 'edits'>;
 
 /** The rows about the canvas. */
 export default async function canvasBench(): Promise<BenchRow[]> {
@@ -48,7 +51,8 @@ export default async function canvasBench(): Promise<BenchRow[]> {
     };
     const whole = await rowsAt(page, 'all in view', 1);
     const near = await rowsAt(page, 'three times nearer', 3);
-    return [opening, ...whole, ...near];
+    const small32 = await rowsAt(page, 'all in view', 1, { staves: 32, courses: 9 });
+    return [opening, ...whole, ...near, ...small32, await memoryRow(page)];
   } finally {
     await browser.close();
   }
@@ -80,20 +84,60 @@ function driven(page: Page, drive: Drive, frames: number): Promise<DriveFigures>
   );
 }
 
-async function rowsAt(page: Page, where: string, factor: number): Promise<BenchRow[]> {
+interface Size {
+  readonly staves: number;
+  readonly courses: number;
+}
+
+/** What is driven, with the bare canvas beside it. */
+const DRIVES: readonly (readonly [what: string, ours: Drive, bare: Drive])[] = [
+  ['panning', 'pan', 'barePan'],
+  ['zooming', 'zoomInAndOut', 'bareZoom'],
+  ['painting', 'paint', 'barePaint'],
+  ['laying a course and undoing it', 'layCourse', 'bareCourse'],
+];
+
+async function rowsAt(
+  page: Page,
+  where: string,
+  factor: number,
+  { staves, courses }: Size = { staves: STAVES, courses: COURSES },
+): Promise<BenchRow[]> {
+  const rows: BenchRow[] = [];
+  for (const [what, ours, bare] of DRIVES) {
+    await opened(page, staves, courses);
+    await page.evaluate(
+      (by) => (globalThis as unknown as CanvasBenchPage).canvasBench.zoom(by),
+      factor,
+    );
+    const mine = await driven(page, ours, FRAMES);
+    rows.push(
+      ...rowsOf(
+        `${what}, ${staves} × ${courses} ${where}`,
+        mine,
+        await driven(page, bare, BARE_FRAMES),
+      ),
+    );
+  }
+  return rows;
+}
+
+/** Script memory that 1 000 edits of a whole course leave behind, undo steps included. */
+async function memoryRow(page: Page): Promise<BenchRow> {
   await opened(page, STAVES, COURSES);
-  await page.evaluate(
-    (by) => (globalThis as unknown as CanvasBenchPage).canvasBench.zoom(by),
-    factor,
+  const bytes = await page.evaluate(
+    (count) => (globalThis as unknown as CanvasBenchPage).canvasBench.edits(count),
+    EDITS,
   );
-  const pan = await driven(page, 'pan', FRAMES);
-  const paint = await driven(page, 'paint', FRAMES);
-  const barePan = await driven(page, 'barePan', BARE_FRAMES);
-  const barePaint = await driven(page, 'barePaint', BARE_FRAMES);
-  return [
-    ...rowsOf(`panning, ${where}`, pan, barePan),
-    ...rowsOf(`painting, ${where}`, paint, barePaint),
-  ];
+  const least = EDITS * STAVES * 3 * 4;
+  const megabytes = (figure: number): string => `${(figure / 1e6).toFixed(1)} MB`;
+  return {
+    what: `canvas: memory after ${EDITS} edits of a whole course, ${STAVES} × ${COURSES}`,
+    ours: megabytes(bytes),
+    baseline: megabytes(least),
+    ratio: bytes / least,
+    note: 'baseline: the undo steps alone, three 4-byte figures a tile',
+  };
 }
 
 function rowsOf(what: string, ours: DriveFigures, bare: DriveFigures): BenchRow[] {

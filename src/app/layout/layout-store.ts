@@ -7,34 +7,15 @@ import {
   effect,
   inject,
   Injectable,
-  linkedSignal,
   signal,
   untracked,
   type OnDestroy,
   type Signal,
 } from '@angular/core';
-import {
-  conflictSchema,
-  type Edit,
-  type EditSaved,
-  type OpenLayout,
-  type RecordedEdit,
-} from '@shared/api/layout';
+import type { OpenLayout, RecordedEdit } from '@shared/api/layout';
 import type { VersionKept } from '@shared/api/version';
-import { wirePatchOf } from '@shared/api/wire-patch';
-import { contrast } from '@shared/checks/contrast';
-import { runShapeChecks } from '@shared/checks/run-checks';
 import type { Grid } from '@shared/layout/cells';
-import { problemsOf } from '@shared/layout/consistency';
-import { woodsSideBySide } from '@shared/layout/neighbours';
-import {
-  invertPatch,
-  patchBetween,
-  resizes,
-  sameValue,
-  type Change,
-  type Patch,
-} from '@shared/layout/patch';
+import { invertPatch, patchBetween, resizes, type Change, type Patch } from '@shared/layout/patch';
 import { readLayout } from '@shared/layout/read-layout';
 import { restatePatch, type Contest } from '@shared/layout/rebase';
 import type { Layout, Wood } from '@shared/layout/schema';
@@ -43,27 +24,23 @@ import { Subject, type Observable } from 'rxjs';
 import { ApiFailure, apiFailureOf } from '../platform/api-problem';
 import { SessionStore } from '../platform/session-store';
 import {
-  isSaved,
   madeChanges,
   openDraft,
-  withAnswer,
   withEdit,
   withGestureFinished,
   withGestureTakenBack,
   withLive,
   withMove,
-  withSave,
-  withSaveTakenBack,
-  withTheirs,
   type Draft,
   type Met,
-  type Save,
 } from './draft';
 import { EditHistory } from './edit-history';
 import { KeptDrafts, type DraftKeeper } from './kept-drafts';
-import { LayoutApi, type SaveWay } from './layout-api';
+import { LayoutApi } from './layout-api';
+import { LayoutSaving } from './layout-saving';
 import { LiveEvents } from './live-events';
-import { SaveQueue, type Attempt, type SaveState } from './save-queue';
+import type { SaveState } from './save-queue';
+import { checksOf, soundLayoutOf } from './sound-layout';
 
 export interface OpenedLayout {
   readonly id: string;
@@ -104,13 +81,15 @@ export class LayoutStore implements OnDestroy {
   private readonly openedLayout = signal<OpenedLayout | null>(null);
   private readonly overlaid = signal<ReadonlySet<number>>(new Set());
   private readonly openContests = signal<readonly Contest[]>([]);
-  private readonly refusedEdit = signal<ApiFailure | null>(null);
   private readonly underHand = signal(false);
   private readonly appliedSubject = new Subject<Applied>();
   private readonly history = new EditHistory();
-  private readonly queue = new SaveQueue({
-    unsaved: () => this.unsaved(),
-    attempt: () => this.attemptSave(),
+  private readonly saves = new LayoutSaving(this.api, {
+    open: () => this.openForSaving(),
+    put: (draft) => this.draft.set(draft),
+    meet: (met) => this.meet(met),
+    takeBack: (draft) => this.lose(draft),
+    inCompany: () => this.people().length > 0,
   });
   private commissionId = '';
 
@@ -125,27 +104,12 @@ export class LayoutStore implements OnDestroy {
     { equal: (a, b) => a.staves === b.staves && a.courses === b.courses },
   );
   readonly lengthUnit: Signal<LengthUnit> = computed(() => this.layout().lengthUnit);
-  /**
-   * The document for drawings and checks: it changes only when something besides the pattern does, and
-   * stays at the last one that holds together while two people's edits together do not.
-   */
-  readonly soundLayout: Signal<Layout> = linkedSignal<Layout, Layout>({
-    source: computed(() => this.layout(), { equal: sameBesidesPattern }),
-    computation: (layout, previous) =>
-      previous && problemsOf(layout).length > 0 ? previous.value : layout,
-  });
-  private readonly shapeChecks = computed(() => runShapeChecks(this.soundLayout()));
-  /** Asked for at every touch, and the same as long as no other woods meet: so no check runs again. */
-  private readonly neighbours = computed(() => woodsSideBySide(this.grid(), this.cells()), {
-    equal: sameValue,
-  });
-  readonly checks = computed(() => [
-    ...this.shapeChecks(),
-    contrast(this.woods(), this.neighbours()),
-  ]);
+  /** The document for drawings and checks: sizes, joints and what else is not the pattern. */
+  readonly soundLayout: Signal<Layout> = soundLayoutOf(this.layout);
+  readonly checks = checksOf(this.layout, this.soundLayout);
   /** The revision the server has. */
   readonly revision = computed(() => this.openDraft().revision);
-  readonly saving: Signal<SaveState> = this.queue.state;
+  readonly saving: Signal<SaveState> = this.saves.state;
   readonly rights = {
     editPattern: computed(() => this.session.may('edit-pattern')),
     editJoint: computed(() => this.session.may('edit-joint')),
@@ -163,7 +127,7 @@ export class LayoutStore implements OnDestroy {
   /** Fields both set, waiting for the person's choice. */
   readonly contests = this.openContests.asReadonly();
   /** Why the server will never take my last edit, which was taken back; null when there is no such thing. */
-  readonly refused = this.refusedEdit.asReadonly();
+  readonly refused = this.saves.refused;
   /** Everybody else who has the layout open. */
   readonly people = this.live.people;
   readonly applied$: Observable<Applied> = this.appliedSubject.asObservable();
@@ -179,7 +143,7 @@ export class LayoutStore implements OnDestroy {
 
   ngOnDestroy(): void {
     this.keeper()?.leave();
-    this.queue.stop();
+    this.saves.stop();
     this.appliedSubject.complete();
   }
 
@@ -202,20 +166,19 @@ export class LayoutStore implements OnDestroy {
   retry(): void {
     if (this.opening().kind === 'failed') void this.open(this.commissionId);
     else {
-      this.queue.retry();
+      this.saves.retry();
       this.live.retry();
     }
   }
 
   /** Saves everything now; resolves when it is saved or failed, `saving` says which. */
   flush(): Promise<void> {
-    return this.queue.flush();
+    return this.saves.flush();
   }
 
   /** True while something would be lost if the page went away now. */
   unsaved(): boolean {
-    const draft = this.draft();
-    return draft !== null && !isSaved(draft);
+    return this.saves.unsaved();
   }
 
   begin(label: string): Gesture {
@@ -259,7 +222,7 @@ export class LayoutStore implements OnDestroy {
 
   /** The person has read why an edit was taken back. */
   dismissRefusal(): void {
-    this.refusedEdit.set(null);
+    this.saves.dismissRefusal();
   }
 
   /** A version was kept of the draft as the server has it. */
@@ -272,7 +235,13 @@ export class LayoutStore implements OnDestroy {
 
   /** Sends what is unsaved in a way that outlives the page. Edits made while a save is under way stay behind. */
   saveLeaving(): void {
-    if (this.unsaved()) void this.attemptSave('leaving');
+    this.saves.leave();
+  }
+
+  private openForSaving() {
+    const opened = this.openedLayout();
+    const draft = this.draft();
+    return opened && draft ? { layoutId: opened.id, draft } : null;
   }
 
   private openDraft(): Draft {
@@ -293,7 +262,7 @@ export class LayoutStore implements OnDestroy {
     this.overlaid.set(new Set());
     this.opening.set({ kind: 'open' });
     this.appliedSubject.next({ patch: [], origin: 'opened' });
-    if (unsent) this.queue.touch();
+    if (unsent) this.saves.touch();
     this.live.watch({
       layoutId: id,
       since: () => this.openDraft().revision,
@@ -341,7 +310,7 @@ export class LayoutStore implements OnDestroy {
 
   private touched(patch: Patch): void {
     this.forgetOverlaid(patch);
-    this.queue.touch();
+    this.saves.touch();
   }
 
   /** A tile laid again is mine beyond doubt; on another grid the positions mean nothing. */
@@ -355,39 +324,10 @@ export class LayoutStore implements OnDestroy {
     );
   }
 
-  private async attemptSave(way: SaveWay = 'staying'): Promise<Attempt> {
-    const opened = this.openedLayout();
-    if (!opened) return { kind: 'done' };
-    this.draft.set(withSave(this.openDraft(), crypto.randomUUID()));
-    const save = this.openDraft().inFlight;
-    if (!save) return { kind: 'not-yet' };
-    try {
-      this.accept(save, await this.api.save(opened.id, wireEdit(save), way));
-      return { kind: 'done' };
-    } catch (thrown) {
-      return this.digest(save, apiFailureOf(thrown));
-    }
-  }
-
-  private accept(save: Save, saved: EditSaved): void {
-    if (this.openDraft().inFlight?.key !== save.key) return;
-    this.meet(withAnswer(this.openDraft(), saved));
-  }
-
-  private digest(save: Save, failure: ApiFailure): Attempt {
-    if (this.openDraft().inFlight?.key !== save.key) return { kind: 'done' };
-    const conflict = conflictOf(failure);
-    if (conflict) {
-      this.meet(withTheirs(this.openDraft(), conflict));
-      return { kind: 'again' };
-    }
-    if (!FINAL_CODES.has(failure.code)) return { kind: 'failed', sentence: failure.message };
+  private lose(draft: Draft): void {
     const before = this.layout();
-    const draft = withSaveTakenBack(this.openDraft());
     this.draft.set(draft);
-    this.refusedEdit.set(failure);
     this.appliedSubject.next({ patch: patchBetween(before, draft.local), origin: 'theirs' });
-    return { kind: 'again' };
   }
 
   private hear(edit: RecordedEdit): void {
@@ -414,38 +354,7 @@ export class LayoutStore implements OnDestroy {
 const UNREADABLE =
   'The server sent a layout that this page cannot read. Load the page again; if it stays, tell whoever runs it.';
 
-function sameBesidesPattern(a: Layout, b: Layout): boolean {
-  return (
-    a.shell === b.shell &&
-    a.joint === b.joint &&
-    a.cutter === b.cutter &&
-    a.build === b.build &&
-    a.lengthUnit === b.lengthUnit
-  );
-}
-
-/** Answers that will not change by asking again: the edit has to go. */
-const FINAL_CODES: ReadonlySet<string> = new Set([
-  'bad-input',
-  'not-allowed',
-  'not-found',
-  'too-large',
-]);
-
 /** True when nothing changed that would have to be kept: moves of a gesture are not kept. */
 function sameUnsent(a: Draft | null, b: Draft | null): boolean {
   return a?.revision === b?.revision && a?.inFlight === b?.inFlight && a?.waiting === b?.waiting;
-}
-
-function wireEdit(save: Save): Edit {
-  const { baseRevision, key, patch } = save;
-  return { baseRevision, idempotencyKey: key, patch: wirePatchOf(patch) };
-}
-
-/** The conflict a 409 carries, or null when the failure is something else. */
-function conflictOf(failure: ApiFailure): EditSaved | null {
-  if (failure.code !== 'conflict') return null;
-  const body = failure.body as { conflict?: unknown } | null;
-  const parsed = conflictSchema.safeParse(body?.conflict);
-  return parsed.success ? parsed.data : null;
 }

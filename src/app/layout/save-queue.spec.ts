@@ -15,6 +15,10 @@ class Desk implements Savable {
     return this.pending > 0;
   }
 
+  pause(): number {
+    return 1_000;
+  }
+
   async attempt(): Promise<Attempt> {
     this.sent.push(Date.now());
     const taken = this.pending;

@@ -1,5 +1,5 @@
 /**
- * When the draft is saved: one second after the last touch, one request at a time, again with growing
+ * When the draft is saved: a short pause after the last touch, one request at a time, again with growing
  * pauses while it fails, and at once when the browser comes back online. What a save carries and what its
  * answer means is the draft's business.
  */
@@ -28,9 +28,10 @@ export interface Savable {
   unsaved(): boolean;
   /** Sends what waits, or the same save again, and digests the answer. */
   attempt(): Promise<Attempt>;
+  /** How long after the last touch it is saved, ms. */
+  pause(): number;
 }
 
-const PAUSE_AFTER_TOUCH = 1_000;
 const RETRY_FIRST = 2_000;
 const RETRY_MOST = 60_000;
 
@@ -72,7 +73,7 @@ export class SaveQueue {
 
   private wait(): void {
     this.current.set({ kind: 'waiting' });
-    this.plan(PAUSE_AFTER_TOUCH);
+    this.plan(this.savable.pause());
   }
 
   private plan(delay: number): void {

@@ -13,7 +13,8 @@ import { LayoutStore } from './layout-store';
     @if (failed(); as failed) {
       <div class="strip" role="alert">
         <p>
-          <b>Not saved.</b> {{ failed.sentence }} What you did is kept on this page and tried again.
+          <b>Not saved.</b> {{ failed.sentence }} What you did is kept in this browser and tried
+          again.
         </p>
         <span class="when" aria-hidden="true">{{ failed.when }}</span>
         <button matButton type="button" (click)="store.retry()">Try now</button>

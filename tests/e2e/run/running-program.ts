@@ -26,6 +26,7 @@ export interface ProgramWithPostgres extends RunningProgram {
 /** Serves the built program on a free port, on a seeded database of its own. */
 export async function startProgram(): Promise<RunningProgram> {
   const database = await freshDatabase();
+  await seed(database.url);
   const server = await serve(database.url);
   return {
     ...server,
@@ -36,10 +37,33 @@ export async function startProgram(): Promise<RunningProgram> {
   };
 }
 
+/** A server process that can be ended and started again at the same address, with the sessions it knew. */
+export interface ServerBeside {
+  readonly address: string;
+  stop(): Promise<void>;
+  start(): Promise<void>;
+}
+
+/** Another server process on the database of a program that runs already. */
+export async function startServerBeside(program: RunningProgram): Promise<ServerBeside> {
+  const sessionSecret = randomBytes(32).toString('hex');
+  let server = await serve(program.databaseUrl, { sessionSecret });
+  const { address } = server;
+  const port = Number(new URL(address).port);
+  return {
+    address,
+    stop: () => server.end(),
+    start: async () => {
+      server = await serve(program.databaseUrl, { sessionSecret, port });
+    },
+  };
+}
+
 /** As startProgram, with a PostgreSQL of its own that the spec may stop and start. Takes 2 s longer. */
 export async function startProgramWithPostgres(): Promise<ProgramWithPostgres> {
   const postgres = await startThrowawayPostgres();
   await migrate(postgres.url);
+  await seed(postgres.url);
   const server = await serve(postgres.url);
   return {
     ...server,
@@ -52,15 +76,21 @@ export async function startProgramWithPostgres(): Promise<ProgramWithPostgres> {
   };
 }
 
-async function serve(databaseUrl: string): Promise<RunningProgram> {
-  await seed(databaseUrl);
+interface ServeOptions {
+  readonly sessionSecret?: string;
+  /** A free one when not said. */
+  readonly port?: number;
+}
+
+async function serve(databaseUrl: string, options: ServeOptions = {}): Promise<RunningProgram> {
+  const { sessionSecret = randomBytes(32).toString('hex') } = options;
   const logs = join(projectFolder, 'out', 'logs');
   mkdirSync(logs, { recursive: true });
-  const port = await freePort();
+  const port = options.port ?? (await freePort());
   const { child, address } = await startServer({
     port,
     databaseUrl,
-    sessionSecret: randomBytes(32).toString('hex'),
+    sessionSecret,
     log: join(logs, `server-${process.pid}-${port}.log`),
     environment: { HOST: '127.0.0.1' },
   });

@@ -25,7 +25,7 @@ import { RoundPanel } from './round/round-panel';
 import { SentenceBar } from './sentence-bar/sentence-bar';
 import { inSentence } from './sentence-words';
 import { PatternSide } from './side/pattern-side';
-import { tileWords } from './spoken';
+import { overlaidWords, tileWords } from './spoken';
 import { WholePattern } from './whole/whole-pattern';
 import { RemoveWoodDialog, type RemoveWoodQuestion } from './wood-tray/remove-wood-dialog';
 import { WoodDialog, type WoodQuestion } from './wood-tray/wood-dialog';
@@ -120,6 +120,11 @@ export class PatternStation {
   });
 
   constructor() {
+    const overlaid = computed(() => this.store.overlaidByMine().size);
+    effect(() => {
+      const count = overlaid();
+      if (count > 0) untracked(() => this.announcer.tell(overlaidWords(count)));
+    });
     const live = inject(LiveEvents);
     effect(() => {
       const tile = this.hand.at();

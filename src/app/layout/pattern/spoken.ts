@@ -44,3 +44,8 @@ export function touchWords(reached: number, changed: number, added: readonly Woo
 export function copiedWords(box: TileBox): string {
   return `Copied ${sizeWords(box)} from ${tileName(box.stave, box.course)} to the right and up. Lay them here or in another layout.`;
 }
+
+/** What others' edits that met mine come to; the tiles are outlined meanwhile. */
+export function overlaidWords(count: number): string {
+  return `Somebody else laid ${tilesWords(count)} you had laid too. Yours lie on top, outlined until you lay them again.`;
+}
