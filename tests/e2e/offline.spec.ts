@@ -6,7 +6,7 @@ import { cellsOf } from './run/open-layout';
 import { startProgram, type RunningProgram } from './run/running-program';
 import { launchChromium, openVisit, type Visit } from './run/visit';
 
-const SAPELE = 2;
+const CHERRY = 2;
 
 let program: RunningProgram;
 let browser: Browser;
@@ -38,7 +38,7 @@ async function woodAt(page: Page, course: number, stave: number): Promise<number
   return Buffer.from((await cellsOf(page)) ?? '', 'base64')[course * 32 + stave - 1];
 }
 
-/** Lays sapele where nothing reaches the server, and waits until the page has said so. */
+/** Lays cherry where nothing reaches the server, and waits until the page has said so. */
 async function layUnsaved(visit: Visit, pattern: PatternPage, stave: number): Promise<string> {
   await pattern.standOn({ course: 'C', stave });
   await visit.context.setOffline(true);
@@ -66,15 +66,15 @@ describe('edits that never reached the server', () => {
     await visit.page.close();
 
     const [theirs, theirPattern] = await openPattern('ines@quarrylane.example');
-    expect(await woodAt(theirs.page, 2, 4)).not.toBe(SAPELE);
+    expect(await woodAt(theirs.page, 2, 4)).not.toBe(CHERRY);
     await theirPattern.layAt({ course: 'C', stave: 6 }, 3);
-    await expect.poll(() => woodAt(theirs.page, 2, 6)).toBe(SAPELE);
+    await expect.poll(() => woodAt(theirs.page, 2, 6)).toBe(CHERRY);
 
     const page = await openAgain(visit, url);
-    await expect.poll(() => woodAt(page, 2, 4)).toBe(SAPELE);
-    expect(await woodAt(page, 2, 6)).toBe(SAPELE);
-    const count = await new PatternPage(page).tilesOf('Sapele');
-    await expect.poll(() => theirPattern.tilesOf('Sapele')).toBe(count);
+    await expect.poll(() => woodAt(page, 2, 4)).toBe(CHERRY);
+    expect(await woodAt(page, 2, 6)).toBe(CHERRY);
+    const count = await new PatternPage(page).tilesOf('Black cherry');
+    await expect.poll(() => theirPattern.tilesOf('Black cherry')).toBe(count);
   });
 
   it('are there again after the page crashed', async () => {
@@ -83,8 +83,9 @@ describe('edits that never reached the server', () => {
     const crashed = visit.page.waitForEvent('crash');
     await visit.page.goto('chrome://crash').catch(() => undefined);
     await crashed;
+    await visit.page.close();
     const page = await openAgain(visit, url);
-    await expect.poll(() => woodAt(page, 2, 8)).toBe(SAPELE);
+    await expect.poll(() => woodAt(page, 2, 8)).toBe(CHERRY);
   });
 
   it('are kept through a reload while saving does not work, and once only', async () => {
@@ -99,17 +100,17 @@ describe('edits that never reached the server', () => {
     await page.keyboard.press('3');
     await page.keyboard.press(' ');
     await expect.poll(() => pattern.saving().textContent(), { timeout: 20_000 }).toBe('not saved');
-    const mine = await pattern.tilesOf('Sapele');
+    const mine = await pattern.tilesOf('Black cherry');
     await page.reload();
     await pattern.surface().waitFor();
-    await expect.poll(() => pattern.tilesOf('Sapele')).toBe(mine);
-    expect(await woodAt(page, 2, 10)).not.toBe(SAPELE);
+    await expect.poll(() => pattern.tilesOf('Black cherry')).toBe(mine);
+    expect(await woodAt(page, 2, 10)).not.toBe(CHERRY);
     await context.unroute(saves);
     await page.getByRole('button', { name: 'Try now' }).click();
-    await expect.poll(() => woodAt(page, 2, 10)).toBe(SAPELE);
+    await expect.poll(() => woodAt(page, 2, 10)).toBe(CHERRY);
     await page.reload();
     await pattern.surface().waitFor();
-    await expect.poll(() => pattern.tilesOf('Sapele')).toBe(mine);
+    await expect.poll(() => pattern.tilesOf('Black cherry')).toBe(mine);
     expect(await pattern.saving().textContent()).toBe('all saved');
   });
 });

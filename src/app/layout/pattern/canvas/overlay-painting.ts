@@ -2,6 +2,7 @@
 import { courseLetters, tileOf } from '@shared/layout/cells';
 import type { Tile } from '@shared/layout/extent';
 import type { Millimetres } from '@shared/units/length';
+import { MOST_OUTLINED, paintManyMarks } from './many-marks';
 import type { SheetDrawing, TilePaths } from './sheet-drawing';
 import { toScreen, turnsInView, type InsetsPx, type SizePx, type Viewport } from './viewport';
 
@@ -187,7 +188,9 @@ function label(
 
 function paintTileMarks(context: Context, frame: OverlayFrame): void {
   const { drawing, view, size } = frame;
-  const marks = marksOf(frame);
+  const many = frame.state.preview.length > MOST_OUTLINED;
+  if (many) paintManyMarks(context, frame, frame.state.preview, frame.colours.teal);
+  const marks = marksOf(many ? { ...frame, state: { ...frame.state, preview: [] } } : frame);
   if (marks.length === 0) return;
   const plain = Math.min(drawing.tileWidth, drawing.tileHeight) * view.pxPerMm < 8;
   for (const turn of turnsInView(view, size, drawing.size)) {
