@@ -104,10 +104,9 @@ describe('edits that never reached the server', () => {
     await page.reload();
     await pattern.surface().waitFor();
     await expect.poll(() => pattern.tilesOf('Black cherry')).toBe(mine);
-    expect(await woodAt(page, 2, 10)).not.toBe(CHERRY);
     await context.unroute(saves);
-    await page.getByRole('button', { name: 'Try now' }).click();
-    await expect.poll(() => woodAt(page, 2, 10)).toBe(CHERRY);
+    await expect.poll(() => woodAt(page, 2, 10), { timeout: 20_000 }).toBe(CHERRY);
+    await expect.poll(() => pattern.saving().textContent(), { timeout: 20_000 }).toBe('all saved');
     await page.reload();
     await pattern.surface().waitFor();
     await expect.poll(() => pattern.tilesOf('Black cherry')).toBe(mine);

@@ -92,18 +92,16 @@ describe('two people in one layout, by two server processes', () => {
     const { bela, ines } = await bothOpen();
     await bela.pattern.standOn({ course: 'C', stave: 5 });
     const took: number[] = [];
-    for (const key of ['2', '1', '2', '1', '2']) {
+    for (const key of ['2', '1', '2', '1']) {
       const before = await ines.pattern.tilesOf('White ash');
       await bela.page.keyboard.press(key);
       const began = performance.now();
       await bela.page.keyboard.press(' ');
-      if ((await bela.pattern.tilesOf('White ash')) === before) continue;
       await expect
         .poll(() => ines.pattern.tilesOf('White ash'), { interval: 20, timeout: 10_000 })
         .not.toBe(before);
       took.push(performance.now() - began);
     }
-    expect(took.length).toBeGreaterThan(2);
     expect(Math.min(...took)).toBeLessThan(1_000);
     await sameOnBoth(bela, ines);
   });
