@@ -10,7 +10,7 @@ import { filter, firstValueFrom, map, startWith } from 'rxjs';
 import { Trouble } from '../drawing/trouble';
 import { BarActions } from '../platform/bar-actions';
 import { BarSlot } from '../platform/bar-slot';
-import { askCarry } from './carry/ask-carry';
+import { askCarry } from './ask-carry';
 import { SessionStore } from '../platform/session-store';
 import { ContestDialog, type ContestAnswer, type ContestQuestion } from './contest-dialog';
 import { KeepVersion } from './keep-version';

@@ -13,7 +13,7 @@ import { LengthField } from '../../drawing/length-field';
 import { PictureView, type PictureMaker } from '../../drawing/picture';
 import { ringPicture } from '../../drawing/ring-picture';
 import { stavePicture } from '../../drawing/stave-picture';
-import { askCarry } from '../carry/ask-carry';
+import { askCarry } from '../ask-carry';
 import { fieldName } from '../field-names';
 import { Findings } from '../findings';
 import { LayoutProposal } from '../layout-proposal';

@@ -20,7 +20,7 @@ import { ChoiceBar, type Choice } from '../../drawing/choice-bar';
 import { CountField } from '../../drawing/count-field';
 import { LengthField } from '../../drawing/length-field';
 import { LengthPipe } from '../../platform/length-pipe';
-import { askCarry } from '../carry/ask-carry';
+import { askCarry } from '../ask-carry';
 import { madeChanges } from '../draft';
 import { fieldName } from '../field-names';
 import type { LayoutStore } from '../layout-store';

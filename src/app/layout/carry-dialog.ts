@@ -3,7 +3,7 @@ import { MatButton } from '@angular/material/button';
 import { MAT_DIALOG_DATA, MatDialogModule } from '@angular/material/dialog';
 import type { Carry, CarriedWay } from '@shared/layout/carry';
 import type { Layout } from '@shared/layout/schema';
-import { PatternSketch } from '../../drawing/pattern-sketch';
+import { PatternSketch } from '../drawing/pattern-sketch';
 import { carryWords, sizeWords } from './carry-words';
 
 export interface CarryQuestion {
