@@ -12,7 +12,12 @@ export const STAGES = [
 export const stageSchema = z.enum(STAGES, { error: `must be one of ${STAGES.join(', ')}` });
 export type Stage = z.infer<typeof stageSchema>;
 
-const dueSchema = z.iso.date({ error: 'must be a date such as 2027-03-14' }).nullable();
+const DUE_RANGE = 'must be a date from 2000 to 2199, such as 2027-03-14';
+
+const dueSchema = z.iso
+  .date({ error: DUE_RANGE })
+  .refine((date) => date >= '2000' && date < '2200', DUE_RANGE)
+  .nullable();
 
 /** A new commission: from a layout file, or from the starting layout when `layout` is left out. */
 export const newCommissionSchema = z.strictObject({

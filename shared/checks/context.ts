@@ -11,7 +11,7 @@ import {
 } from '../pieces/layout-fit';
 import { ringOf, type Ring } from '../shell/ring';
 import { formatCutterFigure, formatLength } from '../units/format';
-import type { LengthUnit, Millimetres } from '../units/length';
+import { fromMillimetres, toMillimetres, type LengthUnit, type Millimetres } from '../units/length';
 import { FINISHING_MARGIN, WEB_MINIMUM_MM, type CheckResult, type CheckSettings } from './check';
 
 /** One joint of the layout with its name in sentences. */
@@ -38,6 +38,8 @@ export interface CheckContext {
   readonly length: (length: Millimetres) => string;
   /** A cutter's diameter with a third decimal where it has one: "3.175 mm". */
   readonly cutter: (diameter: Millimetres) => string;
+  /** The same for a cutter that is offered: never rounded up, or it would not fit. */
+  readonly offeredCutter: (diameter: Millimetres) => string;
 }
 
 /** A check: from what is shared to what was found. */
@@ -63,6 +65,7 @@ export function checkContext(layout: Layout, settings: CheckSettings): CheckCont
     ring: ringOf(layout.shell, staveJoint.reach),
     length: (length) => formatLength(length, unit),
     cutter: (diameter) => formatCutter(diameter, unit),
+    offeredCutter: (diameter) => formatCutter(roundedDown(diameter, unit), unit),
   };
 }
 
@@ -79,4 +82,9 @@ function namedJoint(
 export function formatCutter(diameter: Millimetres, unit: LengthUnit): string {
   const figure = formatCutterFigure(diameter, unit);
   return `${unit === 'mm' ? Number(figure) : figure} ${unit}`;
+}
+
+/** To the third decimal of the reader's unit, towards the smaller cutter. */
+function roundedDown(diameter: Millimetres, unit: LengthUnit): Millimetres {
+  return toMillimetres(Math.floor(fromMillimetres(diameter, unit) * 1000 + 1e-6) / 1000, unit);
 }

@@ -31,7 +31,7 @@ function held(
   radius: Millimetres,
   needed: Millimetres,
 ): Pick<CheckResult, 'result' | 'finding' | 'remedy'> {
-  const { fit, layout, finishingMargin, length, cutter } = context;
+  const { fit, layout, finishingMargin, length, cutter, offeredCutter } = context;
   const place = placeName(context);
   // 1.586 and 1.5875 mm are both "1.59 mm": a third decimal tells them apart
   const figure = radius !== needed && length(radius) === length(needed) ? cutter : length;
@@ -39,7 +39,7 @@ function held(
   const need = `a ${cutter(layout.cutter.diameter)} cutter needs ${figure(needed)}`;
   if (radius < needed - 1e-6) {
     const smaller =
-      fit.largestCutter >= 0.5 ? ` or take a ${cutter(fit.largestCutter)} cutter` : '';
+      fit.largestCutter >= 0.5 ? ` or take a ${offeredCutter(fit.largestCutter)} cutter` : '';
     const remedy = `Widen the ${place.part}${smaller}.`;
     return { result: 'stop', finding: `${size}; ${need}.`, remedy };
   }

@@ -15,8 +15,10 @@ export const trim: Check = (context) => ({
   ...held(context),
 });
 
-/** The trim held against the end tiles. */
-function held(context: CheckContext): Pick<CheckResult, 'result' | 'finding' | 'remedy'> {
+/** The trim held against the end tiles; a caution brings the limit it is about. */
+function held(
+  context: CheckContext,
+): Pick<CheckResult, 'result' | 'finding' | 'remedy'> & Partial<Pick<CheckResult, 'limit'>> {
   const { layout, length } = context;
   const { courses, finishedHeight } = layout.shell;
   const { untrimmedHeight, eachEnd } = trimOf(layout.shell);
@@ -42,7 +44,8 @@ function held(context: CheckContext): Pick<CheckResult, 'result' | 'finding' | '
   if (spoiled) {
     return {
       result: 'caution',
-      finding: `${trimmed}, which ${spoiled}.`,
+      limit: { value: spoiled.limit, kind: 'length' },
+      finding: `${trimmed}, which ${spoiled.words}.`,
       remedy: 'Change the finished height or the height of the tiles.',
     };
   }
@@ -57,14 +60,24 @@ function greatestTrim({ layout }: CheckContext): Millimetres {
 }
 
 /** What a trim line spoils of the end tile's stave joint or of the web above it, or null. */
-function spoiledBy(eachEnd: Millimetres, context: CheckContext): string | null {
+function spoiledBy(
+  eachEnd: Millimetres,
+  context: CheckContext,
+): { readonly words: string; readonly limit: Millimetres } | null {
   const { layout, joints, webMinimum, length } = context;
   const { tileHeight } = layout.shell;
   const head = (joints[0]?.profile.headWidth ?? 0) / 2 + layout.joint.clearance / 2;
   const [from, to] = [tileHeight / 2 - head, tileHeight / 2 + head];
-  if (eachEnd > from && eachEnd < to) return 'cuts the stave joint of the end tiles';
-  const left = eachEnd <= from ? from - eachEnd : greatestTrim(context) - eachEnd;
+  const before = Math.max(0, from - webMinimum);
+  if (eachEnd > from && eachEnd < to) {
+    return { words: 'cuts the stave joint of the end tiles', limit: before };
+  }
+  const end = eachEnd <= from ? from : greatestTrim(context);
+  const left = end - eachEnd;
   if (left >= webMinimum) return null;
   const where = eachEnd <= from ? 'beside the stave joint' : 'under the course joint';
-  return `leaves only ${length(left)} of wood ${where}`;
+  return {
+    words: `leaves only ${length(left)} of wood ${where}`,
+    limit: Math.max(0, end - webMinimum),
+  };
 }

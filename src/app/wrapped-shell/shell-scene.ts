@@ -27,6 +27,11 @@ const PICTURE_WIDTH = 2000;
 const PICTURE_HEIGHT = 1600;
 const TURN_STEP = Math.PI / 24;
 
+/** How much further off a window of this shape looks from: an upright one is narrower than it is tall. */
+function roomFor(aspect: number): number {
+  return Math.max(1, 1.12 / aspect);
+}
+
 export class ShellScene {
   private readonly renderer: WebGLRenderer;
   private readonly scene = new Scene();
@@ -122,8 +127,7 @@ export class ShellScene {
   resize(width: number, height: number): void {
     if (width === 0 || height === 0) return;
     this.renderer.setSize(width, height, false);
-    this.camera.aspect = width / height;
-    this.camera.updateProjectionMatrix();
+    this.shape(width / height);
     this.draw();
   }
 
@@ -133,8 +137,7 @@ export class ShellScene {
     const ratio = this.renderer.getPixelRatio();
     this.renderer.setPixelRatio(1);
     this.renderer.setSize(PICTURE_WIDTH, PICTURE_HEIGHT, false);
-    this.camera.aspect = PICTURE_WIDTH / PICTURE_HEIGHT;
-    this.camera.updateProjectionMatrix();
+    this.shape(PICTURE_WIDTH / PICTURE_HEIGHT);
     this.scene.background = new Color(paper);
     this.renderer.render(this.scene, this.camera);
     const taken = new Promise<Blob>((resolve, reject) => {
@@ -155,6 +158,17 @@ export class ShellScene {
     this.clearRing();
     this.controls.dispose();
     this.renderer.dispose();
+  }
+
+  /** Another shape of the window: upright ones look from further away, so that the shell's sides stay in. */
+  private shape(aspect: number): void {
+    const { camera, controls } = this;
+    const further = roomFor(aspect) / roomFor(camera.aspect);
+    camera.position.sub(controls.target).multiplyScalar(further).add(controls.target);
+    controls.minDistance *= further;
+    controls.maxDistance *= further;
+    camera.aspect = aspect;
+    camera.updateProjectionMatrix();
   }
 
   private draw(): void {
@@ -184,7 +198,8 @@ export class ShellScene {
     const height = shell.finishedHeight;
     const size = Math.hypot(2 * radius, height);
     this.controls.target.set(0, height / 2, 0);
-    const distance = size / (1.85 * Math.tan((VIEW_ANGLE * Math.PI) / 360));
+    const distance =
+      (roomFor(this.camera.aspect) * size) / (1.85 * Math.tan((VIEW_ANGLE * Math.PI) / 360));
     this.controls.minDistance = distance * 0.45;
     this.controls.maxDistance = distance * 2;
     if (view === 'new') this.camera.position.set(0, height / 2 + distance * 0.3, distance * 0.95);

@@ -41,7 +41,7 @@ export class BuildSettings {
   protected readonly wayText = computed(() => {
     const { build, shell, lengthUnit } = this.store.layout();
     if (build.way === 'stave-by-stave') {
-      return 'Blanks are cut, glued into staves and levelled; then the stave edges are cut in the jig.';
+      return 'Blanks are cut, glued into staves and levelled; then the stave edges are cut in the jig. The outlines in the bundle show each tile finished on all four sides: for a blank, leave its long sides straight and wide.';
     }
     const gap = formatLength(outsideGap(shell), lengthUnit);
     return `All four sides are cut square: only for laser, template or flat work. Round the ring it leaves a gap of ${gap} outside at every stave joint.`;

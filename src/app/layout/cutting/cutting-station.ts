@@ -80,7 +80,7 @@ export class CuttingStation {
     ),
   );
   protected readonly species = computed(() =>
-    this.groups().flatMap(({ wood }) => wood.species ?? []),
+    this.groups().flatMap(({ wood }) => wood.species ?? wood.name),
   );
   protected readonly printing = signal<'paper' | 'screen'>('screen');
   protected readonly printedOn = signal('');

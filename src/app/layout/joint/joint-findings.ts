@@ -12,7 +12,8 @@ export function jointFindings(layout: Layout, lengthUnit: LengthUnit): Finding[]
   const checks = runShapeChecks(layout, { lengthUnit }).filter(
     (check) => check.station === 'joint',
   );
-  const radii: Finding = { state: 'clear', text: radiiText(layout, lengthUnit) };
+  const state = checks.find((check) => check.key === 'inside-radius')?.result ?? 'clear';
+  const radii: Finding = { state, text: radiiText(layout, lengthUnit) };
   return [radii, ...checks.map(findingOf)];
 }
 

@@ -31,8 +31,8 @@ import { RemoveWoodDialog, type RemoveWoodQuestion } from './wood-tray/remove-wo
 import { WoodDialog, type WoodQuestion } from './wood-tray/wood-dialog';
 import { WoodTray } from './wood-tray/wood-tray';
 
-/** From this width up tiles are laid; below it the pattern is looked at. */
-const LAYING_FROM = '(min-width: 768px)';
+/** From this width up tiles are laid, a 1440 px window at 200 % zoom included; below it the pattern is looked at. */
+const LAYING_FROM = '(min-width: 700px)';
 
 /** The pattern: the unrolled shell, the sentence that says what a touch does, the woods, and what it comes to. */
 @Component({

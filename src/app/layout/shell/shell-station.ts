@@ -78,7 +78,12 @@ export class ShellStation {
   protected readonly findings = computed(() => shellFindings(this.drawn(), this.unit()));
   protected readonly wall = computed(() => {
     const { shell, joint } = this.drawn();
-    return formatLength(ringOf(shell, joint.staveJoint.reach).wall, this.unit());
+    const ring = ringOf(shell, joint.staveJoint.reach);
+    // a ring that cannot be turned to both circles has no even wall to speak of
+    const turns =
+      ring.turnedAway >= shell.skimAllowance - 1e-9 &&
+      shell.boardThickness >= ring.boardLeast - 1e-9;
+    return turns ? formatLength(ring.wall, this.unit()) : null;
   });
 
   protected readonly ring = computed<PictureMaker>(() => {

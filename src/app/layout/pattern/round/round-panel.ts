@@ -1,9 +1,11 @@
-import { Component, computed, DOCUMENT, inject, input, viewChild } from '@angular/core';
+import { Component, computed, DOCUMENT, inject, viewChild } from '@angular/core';
 import { MatButton } from '@angular/material/button';
+import { layoutFileName } from '@shared/layout/file-name';
 import type { Layout } from '@shared/layout/schema';
 import { Icon } from '../../../drawing/icon';
 import { Announcer } from '../../../platform/announcer';
 import { saveFile } from '../../../platform/save-file';
+import { LayoutStore } from '../../layout-store';
 import { WrappedShell } from '../../../wrapped-shell/wrapped-shell';
 
 /** The wrapped shell beside the canvas: follows every tile, turns, and gives a picture for the client. */
@@ -22,17 +24,15 @@ import { WrappedShell } from '../../../wrapped-shell/wrapped-shell';
   styleUrl: './round-panel.scss',
 })
 export class RoundPanel {
-  /** The layout as far as it holds together; its cells may be those of an earlier stroke. */
-  readonly layout = input.required<Layout>();
-  readonly cells = input.required<Uint8Array>();
-
   private readonly document = inject(DOCUMENT);
   private readonly announcer = inject(Announcer);
   private readonly shell = viewChild.required(WrappedShell);
+  private readonly store = inject(LayoutStore);
+  /** The layout as far as it holds together, with the woods and tiles of this moment. */
   protected readonly shown = computed<Layout>(() => {
-    const layout = this.layout();
-    const cells = this.cells();
-    return cells.length === layout.cells.length ? { ...layout, cells } : layout;
+    const sound = this.store.soundLayout();
+    const { woods, cells } = this.store.layout();
+    return cells.length === sound.cells.length ? { ...sound, woods, cells } : sound;
   });
 
   protected async save(): Promise<void> {
@@ -43,9 +43,6 @@ export class RoundPanel {
       );
       return;
     }
-    const name = this.layout()
-      .name.replace(/[^\p{L}\p{N}]+/gu, '-')
-      .toLowerCase();
-    saveFile(this.document, picture, `${name}.png`);
+    saveFile(this.document, picture, layoutFileName(this.shown().name, '.png'));
   }
 }
