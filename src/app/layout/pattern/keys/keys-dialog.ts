@@ -31,7 +31,7 @@ const LINES: readonly KeyLine[] = [
   imports: [MatButton, MatDialogModule],
   template: `
     <h2 mat-dialog-title>Keys on the pattern</h2>
-    <mat-dialog-content>
+    <mat-dialog-content tabindex="0" role="region" aria-label="List of keys">
       <p>On a Mac, Command stands for Ctrl.</p>
       <dl>
         @for (line of lines; track line.does) {
