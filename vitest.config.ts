@@ -59,6 +59,16 @@ export default defineConfig({
           maxWorkers: 1,
         },
       },
+      {
+        extends: true,
+        test: {
+          name: 'pictures',
+          include: ['tests/e2e/*.pictures.ts'],
+          globalSetup: ['tests/database-setup.ts', 'tests/e2e/built-setup.ts'],
+          testTimeout: 180_000,
+          hookTimeout: 120_000,
+        },
+      },
     ],
   },
 });

@@ -27,6 +27,17 @@ const PICTURE_WIDTH = 2000;
 const PICTURE_HEIGHT = 1600;
 const TURN_STEP = Math.PI / 24;
 
+/** Sharp enough at the shell's edges; more costs frames on small chips. three lowers it to what the chip can do. */
+const ANISOTROPY_MOST = 8;
+
+/** Without a graphics chip the browser draws in software: right, but slow, so it is asked for less. */
+function drawnBy(renderer: WebGLRenderer): 'graphics chip' | 'software' {
+  const context = renderer.getContext();
+  const info = context.getExtension('WEBGL_debug_renderer_info');
+  const name: unknown = info ? context.getParameter(info.UNMASKED_RENDERER_WEBGL) : '';
+  return /swiftshader|llvmpipe|software/i.test(String(name)) ? 'software' : 'graphics chip';
+}
+
 /** How much further off a window of this shape looks from: an upright one is narrower than it is tall. */
 function roomFor(aspect: number): number {
   return Math.max(1, 1.12 / aspect);
@@ -34,6 +45,7 @@ function roomFor(aspect: number): number {
 
 export class ShellScene {
   private readonly renderer: WebGLRenderer;
+  private readonly drawnBy: 'graphics chip' | 'software';
   private readonly scene = new Scene();
   private readonly camera = new PerspectiveCamera(VIEW_ANGLE, 1, 1, 100_000);
   private readonly controls: OrbitControls;
@@ -53,7 +65,12 @@ export class ShellScene {
     this.renderer = new WebGLRenderer({ canvas, antialias: true, alpha: true });
     this.renderer.shadowMap.enabled = true;
     this.renderer.shadowMap.type = VSMShadowMap;
-    this.renderer.setPixelRatio(Math.min(window.devicePixelRatio, 2));
+    // neither the ring nor the sun moves: the shadow is worked out once a shell
+    this.renderer.shadowMap.autoUpdate = false;
+    this.drawnBy = drawnBy(this.renderer);
+    this.renderer.setPixelRatio(
+      this.drawnBy === 'software' ? 1 : Math.min(window.devicePixelRatio, 2),
+    );
     this.controls = new OrbitControls(this.camera, canvas);
     this.controls.enablePan = false;
     this.controls.enableDamping = false;
@@ -75,7 +92,7 @@ export class ShellScene {
     const map = new CanvasTexture(painted.canvas);
     map.wrapS = RepeatWrapping;
     map.colorSpace = SRGBColorSpace;
-    map.anisotropy = this.renderer.capabilities.getMaxAnisotropy();
+    map.anisotropy = this.drawnBy === 'software' ? 1 : ANISOTROPY_MOST;
     this.texture = { painted, map };
     const wood = new MeshStandardMaterial({ map, roughness: 0.62, metalness: 0 });
     const bored = new MeshStandardMaterial({ map, roughness: 0.85, color: new Color(0xb9aa98) });
@@ -89,6 +106,7 @@ export class ShellScene {
     });
     this.scene.add(this.ring);
     this.frameShell(layout, view);
+    this.renderer.shadowMap.needsUpdate = true;
     this.draw();
   }
 

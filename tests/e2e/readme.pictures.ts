@@ -1,4 +1,4 @@
-/** The pictures of the README, taken from the demonstration; only with PICTURES set. */
+/** Takes the pictures of the README from the demonstration: `npm run pictures`. */
 import { mkdirSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 import type { Browser } from 'playwright-core';
@@ -15,7 +15,7 @@ import { launchChromium, openVisit, type Visit } from './run/visit';
 
 const FOLDER = join(projectFolder, 'tests', 'e2e', 'pictures');
 
-describe.runIf(process.env['PICTURES'] !== undefined)('the pictures of the README', () => {
+describe('the pictures of the README', () => {
   let program: RunningProgram;
   let browser: Browser;
   let visit: Visit;
