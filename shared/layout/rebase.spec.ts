@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import { cellAt } from './cells';
-import { applyPatch, fieldChange, layChange, type Change, type Patch } from './patch';
-import { rebase, restatePatch } from './rebase';
+import { applyPatch, fieldChange, invertPatch, layChange, type Change, type Patch } from './patch';
+import { rebase, restatePatch, stillMine } from './rebase';
 import { resizeChange } from './carry';
 import type { Layout } from './schema';
 import { smallLayout } from './small-layout.fixture';
@@ -108,4 +108,22 @@ test('a step to undo takes what it finds as its "before" and drops what is so al
   expect(restatePatch(now, step)).toEqual([
     { kind: 'cells', positions: [1], before: [SAPELE], after: [0] },
   ]);
+});
+
+test('undo leaves alone what somebody else has changed since', () => {
+  const mine = patch(
+    layChange(base.cells, [1, 2], SAPELE),
+    fieldChange(base, 'shell.tileWidth', 31),
+  );
+  const done = applyPatch(base, mine);
+  const overtaken = applyPatch(
+    done,
+    patch(layChange(done.cells, [2], WALNUT), fieldChange(done, 'shell.tileWidth', 33)),
+  );
+  const undo = invertPatch(mine);
+  expect(stillMine(done, undo)).toEqual(undo);
+  expect(applyPatch(overtaken, stillMine(overtaken, undo))).toMatchObject({
+    shell: { tileWidth: 33 },
+    cells: applyPatch(base, patch(layChange(base.cells, [2], WALNUT))).cells,
+  });
 });

@@ -62,6 +62,40 @@ export function restatePatch(layout: Layout, patch: Patch): Patch {
   return rebase(layout, [], [patch]).mine[0] ?? [];
 }
 
+/**
+ * The part of an undo or redo that nobody else has overtaken: tiles and fields that still hold what the step
+ * left there. What others set since stays theirs. A step that resized the grid is kept whole.
+ */
+export function stillMine(layout: Layout, step: Patch): Patch {
+  if (resizes(step)) return step;
+  let now = layout;
+  const kept: Change[] = [];
+  for (const change of step) {
+    const mine = stillMineOf(now, change);
+    if (!mine) continue;
+    kept.push(mine);
+    now = applyPatch(now, [mine]);
+  }
+  return kept;
+}
+
+function stillMineOf(now: Layout, change: Change): Change | null {
+  if (change.kind === 'field') {
+    return sameValue(readField(now, change.path), change.before) ? change : null;
+  }
+  if (change.kind !== 'cells') return change;
+  const held = [...change.positions.keys()].filter(
+    (i) => now.cells[change.positions[i] ?? 0] === change.before[i],
+  );
+  if (held.length === 0) return null;
+  return {
+    kind: 'cells',
+    positions: held.map((i) => change.positions[i] ?? 0),
+    before: held.map((i) => change.before[i] ?? 0),
+    after: held.map((i) => change.after[i] ?? 0),
+  };
+}
+
 /** Two timelines side by side: mine without theirs (`was`) and mine after theirs (`now`). */
 class Walk {
   private was: Layout;

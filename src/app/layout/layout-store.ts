@@ -15,12 +15,20 @@ import {
 import type { OpenLayout, RecordedEdit } from '@shared/api/layout';
 import type { VersionKept } from '@shared/api/version';
 import type { Grid } from '@shared/layout/cells';
-import { invertPatch, patchBetween, resizes, type Change, type Patch } from '@shared/layout/patch';
+import {
+  invertPatch,
+  patchBetween,
+  resizes,
+  sameValue,
+  type Change,
+  type Patch,
+} from '@shared/layout/patch';
 import { readLayout } from '@shared/layout/read-layout';
-import { restatePatch, type Contest } from '@shared/layout/rebase';
+import { restatePatch, stillMine, type Contest } from '@shared/layout/rebase';
 import type { Layout, Wood } from '@shared/layout/schema';
 import type { LengthUnit } from '@shared/units/length';
 import { Subject, type Observable } from 'rxjs';
+import { Announcer } from '../platform/announcer';
 import { ApiFailure, apiFailureOf } from '../platform/api-problem';
 import { SessionStore } from '../platform/session-store';
 import {
@@ -69,10 +77,13 @@ export interface Gesture {
   cancel(): void;
 }
 
+const OVERTAKEN = 'Somebody else has changed part of that since; theirs stays.';
+
 @Injectable()
 export class LayoutStore implements OnDestroy {
   private readonly api = inject(LayoutApi);
   private readonly session = inject(SessionStore);
+  private readonly announcer = inject(Announcer);
   private readonly live = inject(LiveEvents);
   private readonly keptDrafts = inject(KeptDrafts);
   private readonly keeper = signal<DraftKeeper | null>(null);
@@ -142,6 +153,7 @@ export class LayoutStore implements OnDestroy {
   }
 
   ngOnDestroy(): void {
+    this.commissionId = '';
     this.keeper()?.leave();
     this.saves.stop();
     this.appliedSubject.complete();
@@ -155,6 +167,11 @@ export class LayoutStore implements OnDestroy {
       const open = await this.api.open(commissionId);
       this.keeper()?.leave();
       const keeper = await this.keptDrafts.claim(this.session.person()?.id ?? '', open.id);
+      // the page was left, or another layout asked for, while the answer was under way
+      if (this.commissionId !== commissionId) {
+        keeper.leave();
+        return;
+      }
       this.show(open, keeper.found);
       this.keeper.set(keeper);
     } catch (thrown) {
@@ -299,7 +316,10 @@ export class LayoutStore implements OnDestroy {
     origin: 'undo' | 'redo',
   ): void {
     for (let step = take(); step; step = take()) {
-      const patch = restatePatch(this.layout(), turn(step.patch));
+      const turned = turn(step.patch);
+      const mine = stillMine(this.layout(), turned);
+      if (!sameValue(mine, turned)) this.announcer.tell(OVERTAKEN);
+      const patch = restatePatch(this.layout(), mine);
       if (patch.length === 0) continue;
       this.draft.set(withEdit(this.openDraft(), patch));
       this.appliedSubject.next({ patch, origin });
