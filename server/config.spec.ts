@@ -49,7 +49,7 @@ describe('the environment at start', () => {
     'refuses to start when the proxies are said as "%s"',
     (given) => {
       const read = readConfig({ ...least, TRUST_PROXY: given });
-      expect(read).toMatchObject({ sentence: expect.stringMatching(/^TRUST_PROXY must be/) });
+      expect(read.ok ? '' : read.sentence).toMatch(/^TRUST_PROXY must be/);
     },
   );
 });
