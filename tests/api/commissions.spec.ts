@@ -63,6 +63,8 @@ describe('the table of commissions', () => {
   });
 });
 
+const DUE_RANGE = 'must be a date from 2000 to 2199, such as 2027-03-14';
+
 describe('a new commission', () => {
   it('begins with the starting layout under its own title', async () => {
     const made = await newCommission(owner, 'Lamp for the landing');
@@ -87,7 +89,9 @@ describe('a new commission', () => {
     [{ title: '' }, 'title', 'must not be empty'],
     [{ title: 'x'.repeat(121) }, 'title', 'must be at most 120 characters long'],
     [{ title: 'a\u0000b' }, 'title', 'must not contain control characters'],
-    [{ title: 'x', due: '2027-02-30' }, 'due', 'must be a date such as 2027-03-14'],
+    [{ title: 'x', due: '2027-02-30' }, 'due', DUE_RANGE],
+    [{ title: 'x', due: '0001-01-01' }, 'due', DUE_RANGE],
+    [{ title: 'x', due: '2200-01-01' }, 'due', DUE_RANGE],
     [{ title: 'x', client: 12 }, 'client', 'must be text'],
     [{ title: 'x', stage: 'design' }, 'stage', 'is not a known key here'],
   ])('refuses %o and names the field', async (body, field, message) => {
