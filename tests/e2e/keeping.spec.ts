@@ -68,7 +68,7 @@ it('PostgreSQL stops in the middle: the page says so, keeps the work and saves i
     await shell.field('Board').fill('16');
     await shell.trouble().getByText('Not saved.').waitFor();
     const words = await shell.trouble().innerText();
-    expect(words).toContain('What you did is kept on this page and tried again.');
+    expect(words).toContain('What you did is kept in this browser and tried again.');
     expect(words).not.toMatch(/ECONN|postgres|127\.0\.0\.1|select/i);
     expect(await shell.pill().innerText()).toBe('not saved');
     await expectSoundScreen(page, 'not-saved');

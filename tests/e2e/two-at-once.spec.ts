@@ -132,9 +132,10 @@ describe('two people in one layout, by two server processes', () => {
     await ines.visit.context.setOffline(true);
     await ines.page.keyboard.press('3');
     await ines.page.keyboard.press(' ');
+    const saved = bela.page.waitForResponse((answer) => answer.request().method() === 'PATCH');
     await bela.page.keyboard.press('2');
     await bela.page.keyboard.press(' ');
-    await expect.poll(() => bela.pattern.saving().textContent()).toBe('all saved');
+    expect((await saved).status()).toBe(200);
     await ines.visit.context.setOffline(false);
     await sameOnBoth(bela, ines);
     const cells = Buffer.from((await cellsOf(bela.page)) ?? '', 'base64');

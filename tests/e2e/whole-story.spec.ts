@@ -213,7 +213,7 @@ describe('a shell from the first idea to the machine', () => {
     await review.goTo('Review');
     await review.whatChangedIn(2);
     await review.comparison().getByText('Changed:').waitFor();
-    expect(await review.comparison().innerText()).toContain('tiles');
+    await expect.poll(() => review.comparison().innerText()).toContain('tiles');
     await expectSoundScreen(visit.page, 'review');
     const dialog = await review.startRestoring(1);
     await expectSoundScreen(visit.page, 'restore');
